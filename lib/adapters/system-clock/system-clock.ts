@@ -1,0 +1,3 @@
+import type { Clock } from '@/lib/ports/clock'
+
+export const systemClock: Clock = { now: () => Date.now() }

@@ -1,0 +1,46 @@
+import 'server-only'
+import { mkdirSync } from 'node:fs'
+
+import type { Logger } from 'pino'
+
+import { openDatabase } from '@/db/client'
+import { createArgon2Hasher } from '@/lib/adapters/argon2/argon2-hasher'
+import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
+import { randomIds } from '@/lib/adapters/random-ids/random-ids'
+import { systemClock } from '@/lib/adapters/system-clock/system-clock'
+import type { Deps } from '@/lib/domain/deps'
+
+import { parseEnv, type Env } from './env'
+import { createLog } from './log'
+
+/** What one running portal holds: settings, log and everything that services need except the request. */
+export type Container = {
+  readonly env: Env
+  readonly log: Logger
+  readonly deps: Omit<Deps, 'request'>
+}
+
+function createContainer(): Container {
+  const env = parseEnv(process.env)
+  mkdirSync(env.dataFolder, { recursive: true })
+  return {
+    env,
+    log: createLog(env.logLevel),
+    deps: {
+      db: openDatabase(env.databaseFile),
+      clock: systemClock,
+      ids: randomIds,
+      files: createDiskFileStore(env.evidenceFolder),
+      passwords: createArgon2Hasher(),
+      settings: { practiceName: env.practice.name, publicUrl: env.publicUrl },
+    },
+  }
+}
+
+// The bundler may load this module more than once in one process; the database is opened once all the same.
+const shared = globalThis as typeof globalThis & { quellbenchContainer?: Container }
+
+export function container(): Container {
+  shared.quellbenchContainer ??= createContainer()
+  return shared.quellbenchContainer
+}
