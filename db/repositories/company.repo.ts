@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { CompanyTable } from '@/db/schema'
+import type { CompanyTable } from '@/db/tables/identity'
 
 export type CompanyRow = Selectable<CompanyTable>
 

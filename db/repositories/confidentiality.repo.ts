@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { ConfidentialityAcceptanceTable, ConfidentialityTermsTable } from '@/db/schema'
+import type { ConfidentialityAcceptanceTable, ConfidentialityTermsTable } from '@/db/tables/identity'
 
 export type TermsRow = Selectable<ConfidentialityTermsTable>
 

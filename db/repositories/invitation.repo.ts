@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { InvitationTable, OneTimeLinkTable } from '@/db/schema'
+import type { InvitationTable, OneTimeLinkTable } from '@/db/tables/identity'
 
 export type InvitationRow = Selectable<InvitationTable>
 export type OneTimeLinkRow = Selectable<OneTimeLinkTable>

@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { OutboxMessageTable } from '@/db/schema'
+import type { OutboxMessageTable } from '@/db/tables/outbox'
 
 export type OutboxRow = Selectable<OutboxMessageTable>
 

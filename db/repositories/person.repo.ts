@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { CompanyRole, MembershipTable, PersonTable } from '@/db/schema'
+import type { CompanyRole, MembershipTable, PersonTable } from '@/db/tables/identity'
 
 export type PersonRow = Selectable<PersonTable>
 

@@ -2,7 +2,7 @@ import 'server-only'
 import type { Insertable, Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
-import type { SessionTable } from '@/db/schema'
+import type { SessionTable } from '@/db/tables/identity'
 
 export type SessionRow = Selectable<SessionTable>
 

@@ -1,4 +1,4 @@
-import type { CompanyRole } from '@/db/schema'
+import type { CompanyRole } from '@/db/tables/identity'
 import { withTx } from '@/db/tx'
 import type { Actor } from '@/lib/authz/actor'
 

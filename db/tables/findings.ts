@@ -1,0 +1,43 @@
+export type MethodRunTable = {
+  id: string
+  engagement_id: string
+  method_id: string
+  method_version: number
+  inputs: string
+  result: string
+  created_by: string
+  created_at: number
+}
+
+export type MethodRunEvidenceTable = { run_id: string; evidence_id: string; sha256: string }
+
+export type FindingSeverity = 'critical' | 'major' | 'minor' | 'note'
+
+export type FindingConfidence = 'high' | 'medium' | 'low'
+
+export type FindingTable = {
+  id: string
+  engagement_id: string
+  number: number
+  claim: string
+  severity: FindingSeverity
+  confidence: FindingConfidence
+  reasoning: string
+  alternative_causes: string
+  disproving_experiment: string
+  status: 'draft' | 'published'
+  author_id: string
+  created_at: number
+  published_at: number | null
+}
+
+export type FindingRunTable = { finding_id: string; run_id: string; position: number }
+
+export type FindingActionTable = {
+  id: string
+  finding_id: string
+  position: number
+  instruction: string
+  part_values: string
+  side_effects: string
+}
