@@ -1,0 +1,5 @@
+export type NavigationItem = {
+  readonly label: string
+  readonly href: string
+  readonly current?: boolean | undefined
+}
