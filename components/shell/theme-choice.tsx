@@ -2,10 +2,9 @@
 
 import { useState } from 'react'
 
-export type Theme = 'system' | 'light' | 'dark'
+import { themeCookie } from './theme-cookie'
 
-/** The cookie that the root layout reads to set <html data-theme>; it holds "light" or "dark", or is absent. */
-export const themeCookie = 'theme'
+export type Theme = 'system' | 'light' | 'dark'
 
 const labels: readonly (readonly [Theme, string])[] = [
   ['system', 'As the system'],

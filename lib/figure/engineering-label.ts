@@ -1,0 +1,57 @@
+/** SI prefixes (SI Brochure, 9th edition, table 7), the powers of 1000 that electronics uses. */
+const prefixes = new Map([
+  [-15, 'f'],
+  [-12, 'p'],
+  [-9, 'n'],
+  [-6, 'µ'],
+  [-3, 'm'],
+  [0, ''],
+  [3, 'k'],
+  [6, 'M'],
+  [9, 'G'],
+  [12, 'T'],
+])
+
+/** Units that take a prefix; decibels, per cent, degrees and pure numbers never do. */
+const prefixable = /^(s|Hz|V|A|Ω|F|H|W|m|T|J|C|S|Wb)([/·].*)?$/
+
+const lowest = -15
+const highest = 12
+
+export type EngineeringScale = { readonly exponent: number; readonly unit: string }
+
+/** The prefix under which `value` reads between 1 and 999, and the unit with that prefix written before it. */
+export const engineeringScale = (value: number, unit: string): EngineeringScale => {
+  const size = Math.abs(value)
+  if (!prefixable.test(unit) || size === 0 || !Number.isFinite(size)) return { exponent: 0, unit }
+  // The small excess keeps 1e-9 and 1e6, which logarithms miss by a few parts in 1e16, on their own prefix.
+  const thousands = Math.floor(Math.log10(size) / 3 + 1e-12)
+  const exponent = Math.min(highest, Math.max(lowest, thousands * 3))
+  return { exponent, unit: `${prefixes.get(exponent) ?? ''}${unit}` }
+}
+
+/** A number with a true minus sign and no trailing zeros beyond `decimals`; never "−0". */
+export const plainNumber = (value: number, decimals: number): string => {
+  const text = value.toFixed(Math.min(20, Math.max(0, decimals)))
+  return Number(text) === 0 ? text.replace('-', '') : text.replace('-', '−')
+}
+
+export type EngineeringLabel = { readonly number: string; readonly unit: string }
+
+/** `value` in engineering notation with the given significant digits: 1.8e8 Hz becomes "180" "MHz". */
+export const engineeringLabel = (value: number, unit: string, significant = 4): EngineeringLabel => {
+  if (value === 0 || !Number.isFinite(value)) return { number: Number.isFinite(value) ? '0' : '–', unit }
+  // Rounding first lets 999.96e6 become 1.000 G, not 1000 M.
+  const rounded = Number(value.toPrecision(significant))
+  const scale = engineeringScale(rounded, unit)
+  const scaled = rounded / 10 ** scale.exponent
+  const decimals = significant - 1 - Math.floor(Math.log10(Math.abs(scaled)) + 1e-12)
+  return { number: plainNumber(scaled, decimals), unit: scale.unit }
+}
+
+/** The shortest exact form of a round value, for an axis: 3e7 Hz becomes "30 MHz". */
+export const roundLabel = (value: number, unit: string): string => {
+  const scale = engineeringScale(value, unit)
+  const digits = Number((value / 10 ** scale.exponent).toPrecision(6)).toString()
+  return [digits.replace('-', '−'), scale.unit].filter(Boolean).join('\u00a0')
+}

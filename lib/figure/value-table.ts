@@ -1,0 +1,48 @@
+import type { Axis, Figure, Series } from '@/lib/core/figure/figure'
+
+import { engineeringLabel, type EngineeringLabel } from './engineering-label'
+
+export type ValueRow = { readonly x: EngineeringLabel; readonly y: EngineeringLabel; readonly note: string }
+
+export type ValueTable = {
+  readonly id: string
+  readonly label: string
+  readonly rows: readonly ValueRow[]
+  /** Points that the series holds; more than `rows` when the table shows a selection. */
+  readonly total: number
+}
+
+const indexOfExtreme = (values: readonly number[], isBetter: (a: number, b: number) => boolean): number => {
+  let best = -1
+  for (let index = 0; index < values.length; index += 1) {
+    const value = values[index]
+    const current = values[best]
+    if (value === undefined || !Number.isFinite(value)) continue
+    if (current === undefined || isBetter(value, current)) best = index
+  }
+  return best
+}
+
+const selection = (length: number, most: number, extremes: readonly number[]): number[] => {
+  const even =
+    length <= most
+      ? Array.from({ length }, (_, index) => index)
+      : Array.from({ length: most }, (_, index) => Math.round((index * (length - 1)) / (most - 1)))
+  return [...new Set([...even, ...extremes.filter((index) => index >= 0)])].sort((a, b) => a - b)
+}
+
+const tableOf = (series: Series, x: Axis, y: Axis, most: number): ValueTable => {
+  const highest = indexOfExtreme(series.y, (a, b) => a > b)
+  const lowest = indexOfExtreme(series.y, (a, b) => a < b)
+  const noteFor = (index: number) => (index === highest ? 'highest' : index === lowest ? 'lowest' : '')
+  const rows = selection(series.x.length, most, [highest, lowest]).map((index) => ({
+    x: engineeringLabel(series.x[index] ?? NaN, x.unit),
+    y: engineeringLabel(series.y[index] ?? NaN, y.unit),
+    note: noteFor(index),
+  }))
+  return { id: series.id, label: series.label, rows, total: series.x.length }
+}
+
+/** The figure as tables, one a series: evenly chosen points and always the highest and the lowest. */
+export const valueTables = (figure: Figure, most = 20): ValueTable[] =>
+  figure.series.map((series) => tableOf(series, figure.x, figure.y, most))
