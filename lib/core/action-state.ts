@@ -12,6 +12,6 @@ export type ActionError = {
 
 /** The signature of every form action. */
 export type FormAction<Value = unknown> = (
-  previous: ActionState<Value>,
+  previous: ActionState,
   form: FormData,
 ) => Promise<ActionState<Value>>

@@ -15,7 +15,13 @@ export const readTerms = operation('identity.readTerms', companyIdSchema, async 
   if (!allowed.ok) return allowed
   const terms = await findCurrentTerms(deps.db)
   if (!terms) return err(notFound)
-  return ok({ version: terms.version, title: terms.title, body: terms.body })
+  const membership = actor.memberships.find((held) => held.companyId === input.companyId)
+  return ok({
+    version: terms.version,
+    title: terms.title,
+    body: terms.body,
+    companyName: membership?.companyName ?? '',
+  })
 })
 
 /** Records that the person accepted the version in force, with typed name, time and network address. */

@@ -85,6 +85,26 @@ export const askForPasswordReset = openOperation(
   },
 )
 
+export type PasswordLinkDto = { readonly email: string; readonly needsName: boolean }
+
+/** Whose password a link sets, for the page that it opens; looking does not use it up. */
+export const readPasswordLink = openOperation(
+  'identity.readPasswordLink',
+  invitationTokenSchema,
+  async (deps, input): Promise<Result<PasswordLinkDto, IdentityError>> => {
+    const link = await findOneTimeLink(deps.db, hashSecret(input.token))
+    if (!link || !isUsable(link, deps, deps.clock.now())) return err(linkNotUsable)
+    if (link.person_id !== null) {
+      const person = await findPerson(deps.db, link.person_id)
+      return person ? ok({ email: person.email, needsName: false }) : err(linkNotUsable)
+    }
+    const invitation = link.invitation_id ? await findInvitation(deps.db, link.invitation_id) : undefined
+    if (!invitation) return err(linkNotUsable)
+    const known = await findPersonByEmail(deps.db, invitation.email)
+    return ok({ email: invitation.email, needsName: known === undefined })
+  },
+)
+
 /**
  * Uses a link up: sets the password and, for an invitation, creates the person and their membership or role. Every
  * earlier session of the person ends.

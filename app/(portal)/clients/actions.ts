@@ -1,0 +1,6 @@
+'use server'
+
+import { action } from '@/lib/server/action'
+import { invitations } from '@/lib/server/operations'
+
+export const inviteCompany = action(invitations.inviteCompany)

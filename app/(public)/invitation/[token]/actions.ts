@@ -1,0 +1,6 @@
+'use server'
+
+import { openAction } from '@/lib/server/action'
+import { links } from '@/lib/server/operations'
+
+export const askForLink = openAction(links.askForInvitationLink)

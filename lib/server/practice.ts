@@ -1,0 +1,6 @@
+import 'server-only'
+
+import { container } from './container'
+
+/** The practice's name as it stands at the head of every page. */
+export const practiceName = (): string => container().env.practice.name

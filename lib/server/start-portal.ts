@@ -1,0 +1,21 @@
+import 'server-only'
+
+import { pendingMigrations } from '@/db/migrate'
+
+import { container } from './container'
+
+/** Reads the settings, opens the database and makes sure that its schema is the one of this build. */
+export async function startPortal(): Promise<void> {
+  try {
+    const { deps, log, env } = container()
+    const pending = await pendingMigrations(deps.db)
+    if (pending.length > 0) {
+      const names = pending.map((migration) => migration.name).join(', ')
+      throw new Error(`The database lacks ${names}. Run: npm run migrate`)
+    }
+    log.info({ publicUrl: env.publicUrl }, 'portal started')
+  } catch (error) {
+    process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`)
+    process.exit(1)
+  }
+}
