@@ -1,0 +1,67 @@
+import { execFileSync } from 'node:child_process'
+import { existsSync, statSync } from 'node:fs'
+
+import { run } from './run.mjs'
+import { say, stop } from './say.mjs'
+
+/** Programs by the Debian package that brings them: to compile the database driver, and to check results in tests. */
+const buildTools = { python3: 'python3', make: 'make', 'g++': 'g++' }
+const testTools = {
+  chromium: 'chromium',
+  pdfsig: 'poppler-utils',
+  qpdf: 'qpdf',
+  certutil: 'libnss3-tools',
+  openssl: 'openssl',
+  ngspice: 'ngspice',
+}
+
+/** Installs the packages of package-lock.json when they are absent or older than the lock file. */
+export async function installPackages() {
+  checkNode()
+  const marker = 'node_modules/.package-lock.json'
+  const isCurrent = existsSync(marker) && statSync(marker).mtimeMs >= statSync('package-lock.json').mtimeMs
+  if (isCurrent) return
+  await installTools(buildTools, 'to compile the database driver')
+  say('Installing packages with npm ci (about two minutes; the database driver is compiled)')
+  await run('npm', ['ci', '--no-audit', '--no-fund', '--loglevel=error'])
+}
+
+/** Installs what the tests check results with: a browser, PDF tools, a circuit simulator. */
+export const installTestTools = () => installTools(testTools, 'for the tests')
+
+function checkNode() {
+  const [major = 0, minor = 0] = process.versions.node.split('.').map(Number)
+  if (major < 20 || (major === 20 && minor < 19)) {
+    stop(`Node.js ${process.versions.node} is too old for the portal: install Node.js 20.19 or newer.`)
+  }
+}
+
+async function installTools(tools, purpose) {
+  const missing = Object.entries(tools).filter(([program]) => !isOnPath(program))
+  if (missing.length === 0) return
+  const packages = [...new Set(missing.map(([, debianPackage]) => debianPackage))]
+  const command = `apt-get install -y --no-install-recommends ${packages.join(' ')}`
+  if (!isOnPath('apt-get')) {
+    stop(
+      `Needed ${purpose} and not found: ${packages.join(', ')}. Install them with your system's package manager.`,
+    )
+  }
+  if (process.getuid?.() !== 0) {
+    stop(
+      `Needed ${purpose} and not found: ${packages.join(', ')}. Run: sudo apt-get update && sudo ${command}`,
+    )
+  }
+  say(`Installing ${packages.join(', ')} ${purpose}`)
+  const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' }
+  await run('apt-get', ['update', '-qq'], { env })
+  await run('sh', ['-c', `${command} -qq > /dev/null`], { env })
+}
+
+function isOnPath(program) {
+  try {
+    execFileSync('sh', ['-c', `command -v ${program}`], { stdio: 'ignore' })
+    return true
+  } catch {
+    return false
+  }
+}
