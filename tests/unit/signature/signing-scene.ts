@@ -92,7 +92,7 @@ export function requestFor(
 
 export function expectationOf(
   scene: SigningScene,
-  roles = ['author', 'reviewer'] as const,
+  roles: readonly ('author' | 'reviewer')[] = ['author', 'reviewer'],
 ): VerificationInput {
   return {
     authorityCertificateDer: scene.authority.certificateDer,
