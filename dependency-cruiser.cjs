@@ -37,7 +37,7 @@ module.exports = {
     ),
     rule(
       'repos-only-from-domain',
-      { pathNot: '^(db|lib/domain|lib/server|migrations|tests)/' },
+      { pathNot: '^(db|lib/(domain|server|commands)|migrations|tests)/' },
       { path: '^db/' },
     ),
     rule(
