@@ -8,7 +8,13 @@ import { checkContainer } from './verifying/check-container'
 import { checkField, pageOf } from './verifying/check-field'
 import { checkRevision } from './verifying/check-revision'
 import { readSignatureEntry, type SignatureEntry, type SignedField } from './verifying/signature-entry'
-import type { CheckedSignature, ExpectedSignature, Problem, SignatureVerdict } from './verifying/verdict'
+import {
+  CHECK_NAMES,
+  type CheckedSignature,
+  type ExpectedSignature,
+  type Problem,
+  type SignatureVerdict,
+} from './verifying/verdict'
 
 /** What the portal knows of the report beforehand; without it a signature proves nothing. */
 export type VerificationInput = {
@@ -57,10 +63,14 @@ const verdict = (
   signatures: readonly CheckedSignature[],
   problems: readonly Problem[],
 ): SignatureVerdict => ({
-  valid: signatures.length > 0 && problems.length === 0,
+  valid: signatures.length > 0 && signatures.every(hasPassedAll) && problems.length === 0,
   signatures,
   problems,
 })
+
+/** Stated by the rules, not by the absence of failures: a check that was not made must not count as passed. */
+const hasPassedAll = ({ checks }: CheckedSignature): boolean =>
+  CHECK_NAMES.every((rule) => checks.some(({ name, passed }) => name === rule && passed))
 
 const isSigned = (field: FormField): field is SignedField => field.signature !== null
 
@@ -75,11 +85,11 @@ type Surroundings = {
 function checkSignature(file: PdfFile, entry: SignatureEntry, around: Surroundings): CheckedSignature {
   const { previous, pages, fields, authority, input } = around
   const expected = input.expected.find(({ field }) => field === entry.field.name)
-  const container = checkContainer(file, entry)
+  const { certificates, checks } = checkContainer(file, entry)
   return {
     field: entry.field.name,
-    signerName: container.signer?.commonName ?? null,
-    fingerprint: container.signer?.fingerprint ?? null,
+    signerName: certificates?.signer.commonName ?? null,
+    fingerprint: certificates?.signer.fingerprint ?? null,
     signedAt: entry.signedAt,
     reason: entry.reason,
     page: pageOf(entry.field.dictionary, pages),
@@ -87,8 +97,8 @@ function checkSignature(file: PdfFile, entry: SignatureEntry, around: Surroundin
     checks: [
       checkField(file, entry, pages, fields, expected),
       ...checkRevision(file, entry, previous),
-      ...container.checks,
-      ...checkCertificate(entry, container, authority, expected),
+      ...checks,
+      ...(certificates ? checkCertificate(entry, certificates, authority, expected) : []),
     ],
   }
 }

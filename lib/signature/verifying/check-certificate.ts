@@ -7,11 +7,10 @@ import { check, type ExpectedSignature, type SignatureCheck } from './verdict'
 /** The certificate is the recorded one, the pinned authority of the practice issued it, and it was valid at signing. */
 export function checkCertificate(
   entry: SignatureEntry,
-  { signer, authority }: ContainerOutcome,
+  { signer, authority }: NonNullable<ContainerOutcome['certificates']>,
   pinnedAuthority: CertificateFacts | null,
   expected: ExpectedSignature | undefined,
 ): SignatureCheck[] {
-  if (!signer || !authority) return []
   return [
     check(
       'certificate',

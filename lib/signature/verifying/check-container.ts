@@ -12,23 +12,21 @@ import { check, type SignatureCheck } from './verdict'
 
 export type ContainerOutcome = {
   readonly checks: readonly SignatureCheck[]
-  readonly signer: CertificateFacts | null
-  readonly authority: CertificateFacts | null
+  /** The certificates that the container carries; null where it cannot be read with both of them. */
+  readonly certificates: { readonly signer: CertificateFacts; readonly authority: CertificateFacts } | null
 }
 
 /** The container is well formed, its digest is that of the signed bytes, and the signer's key made the signature. */
 export function checkContainer(file: PdfFile, entry: SignatureEntry): ContainerOutcome {
   const parts = readParts(file, entry)
-  if (!parts.ok)
-    return { checks: [check('container', false, '', parts.error)], signer: null, authority: null }
+  if (!parts.ok) return unreadable(parts.error)
   const { signerCertificateDer, authorityCertificateDer, documentDigest, signature } = parts.value
   const signer = readCertificate(signerCertificateDer)
   const authority = readCertificate(authorityCertificateDer)
+  if (!signer || !authority) return unreadable('A certificate in the signature cannot be read.')
   const { der } = signedAttributes(documentDigest, signerCertificateDer)
-  const isSigned = signer !== null && verifyP256(der, signer, signature)
   return {
-    signer,
-    authority,
+    certificates: { signer, authority },
     checks: [
       check('container', true, 'The signature holds exactly the parts that it should.', ''),
       check(
@@ -39,13 +37,18 @@ export function checkContainer(file: PdfFile, entry: SignatureEntry): ContainerO
       ),
       check(
         'signature_value',
-        isSigned,
+        verifyP256(der, signer, signature),
         "The signature was made with the key of the signer's certificate.",
         "The signature was not made with the key of the signer's certificate.",
       ),
     ],
   }
 }
+
+const unreadable = (sentence: string): ContainerOutcome => ({
+  checks: [check('container', false, '', sentence)],
+  certificates: null,
+})
 
 /** The container's bytes without the padding, which must be zeros in the notation that the practice writes. */
 function readParts(file: PdfFile, entry: SignatureEntry): Result<ContainerParts, string> {

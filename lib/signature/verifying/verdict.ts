@@ -10,17 +10,21 @@ export type ExpectedSignature = {
   readonly block?: { readonly page: number; readonly rectangle: Rectangle }
 }
 
-export type CheckName =
-  | 'field'
-  | 'byte_range'
-  | 'coverage'
-  | 'changes'
-  | 'container'
-  | 'document_digest'
-  | 'signature_value'
-  | 'certificate'
-  | 'issuer'
-  | 'validity'
+/** The rules, in the order of the checks; a signature that has not passed each of them is not valid. */
+export const CHECK_NAMES = [
+  'field',
+  'byte_range',
+  'coverage',
+  'changes',
+  'container',
+  'document_digest',
+  'signature_value',
+  'certificate',
+  'issuer',
+  'validity',
+] as const
+
+export type CheckName = (typeof CHECK_NAMES)[number]
 
 /** One rule that was checked on one signature, with a sentence that fits its outcome. */
 export type SignatureCheck = {
@@ -40,6 +44,7 @@ export type CheckedSignature = {
   /** Counted from 0. */
   readonly page: number | null
   readonly coversWholeFileAtItsRevision: boolean
+  /** One for each name; after a container that cannot be read, the rules that need it are left out. */
   readonly checks: readonly SignatureCheck[]
 }
 

@@ -49,7 +49,7 @@ describe('reading hostile files', () => {
           expect(verifyPdf(changed, expectationOf(scene)).valid).toBe(false)
         },
       ),
-      { numRuns: 200 },
+      { numRuns: 60 },
     )
   })
 

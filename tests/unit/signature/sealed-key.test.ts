@@ -31,7 +31,9 @@ describe('a signing key at rest', () => {
   it('never holds the key in clear, and never seals twice alike', async () => {
     const [first, second] = [await seal(), await seal()]
     expect(first.ciphertext).not.toBe(second.ciphertext)
-    expect(Buffer.from(first.ciphertext, 'base64').includes(privateKeyPkcs8.subarray(0, 8))).toBe(false)
+    expect(
+      Buffer.from(first.ciphertext, 'base64').includes(Buffer.from(privateKeyPkcs8.subarray(0, 8))),
+    ).toBe(false)
   })
 
   it('refuses a stored form of another version, with weaker parameters, or broken', async () => {

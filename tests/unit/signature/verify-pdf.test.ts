@@ -52,18 +52,30 @@ describe('verifying a signed report', () => {
     }
   })
 
-  it('BZ3: notices every flipped bit in both signature containers and their padding', () => {
-    const places = [...latin1(twice).matchAll(/\/Contents <([0-9a-f]+)>/g)]
+  it('BZ3: notices flipped bits in both signature containers and in the zeros behind them', () => {
+    const places = [...latin1(twice).matchAll(/\/Contents <([0-9a-f]+?)(0{100,})>/g)]
     expect(places).toHaveLength(2)
     for (const place of places) {
       const start = place.index + '/Contents <'.length
-      for (let offset = start; offset < start + 8192; offset += 61) {
-        for (const bit of [0x01, 0x20]) {
-          const flipped = Uint8Array.from(twice)
-          flipped[offset] = (flipped[offset] ?? 0) ^ bit
-          expect(verifyPdf(flipped, expectationOf(scene)).valid, `byte ${offset}`).toBe(false)
-        }
+      const used = place[1]?.length ?? 0
+      const offsets = Array.from({ length: 40 }, (_, index) => start + Math.floor((index * used) / 40))
+      for (const offset of [...offsets, start + used + 50, start + 8191]) {
+        const flipped = Uint8Array.from(twice)
+        flipped[offset] = (flipped[offset] ?? 0) ^ (offset % 2 ? 0x01 : 0x20)
+        expect(verifyPdf(flipped, expectationOf(scene)).valid, `byte ${offset}`).toBe(false)
       }
+    }
+  })
+
+  it('refuses a container whose certificate of the authority cannot be read', () => {
+    const curve = '06082a8648ce3d030107'
+    expect(latin1(twice).split(curve)).toHaveLength(5)
+    for (const index of [1, 2, 3, 4]) {
+      const parts = latin1(twice).split(curve)
+      const damaged = `${parts.slice(0, index).join(curve)}06082a8648ce3d030106${parts.slice(index).join(curve)}`
+      const verdict = verifyPdf(fromLatin1(damaged), expectationOf(scene))
+      expect(verdict.valid).toBe(false)
+      expect(verdict.problems.length).toBeGreaterThan(0)
     }
   })
 
