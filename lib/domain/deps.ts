@@ -1,4 +1,5 @@
 import type { Db } from '@/db/client'
+import type { CaptureAnalyser } from '@/lib/ports/capture-analyser'
 import type { Clock } from '@/lib/ports/clock'
 import type { FileStore } from '@/lib/ports/file-store'
 import type { Ids } from '@/lib/ports/ids'
@@ -15,6 +16,7 @@ export type RequestInfo = {
 export type PracticeSettings = {
   readonly practiceName: string
   readonly publicUrl: string
+  readonly uploadLimitBytes: number
 }
 
 /** Everything a service needs from outside, handed in so that tests can hand in other pieces. */
@@ -23,6 +25,7 @@ export type Deps = {
   readonly clock: Clock
   readonly ids: Ids
   readonly files: FileStore
+  readonly captures: CaptureAnalyser
   readonly passwords: PasswordHasher
   readonly settings: PracticeSettings
   readonly request: RequestInfo

@@ -17,6 +17,8 @@ export type FileStore = {
   ) => Promise<Result<StoredFile, StoreError>>
   readonly writeBytes: (id: string, bytes: Uint8Array) => Promise<StoredFile>
   readonly read: (id: string) => Promise<Uint8Array>
+  /** `length` bytes from `start`; fewer where the file ends. */
+  readonly readPart: (id: string, start: number, length: number) => Promise<Uint8Array>
   /** A stream over part of a file, opened when first pulled and closed when done or cancelled. */
   readonly stream: (id: string) => ReadableStream<Uint8Array>
   readonly pathOf: (id: string) => string

@@ -5,6 +5,7 @@ import type { Logger } from 'pino'
 
 import { openDatabase } from '@/db/client'
 import { createArgon2Hasher } from '@/lib/adapters/argon2/argon2-hasher'
+import { createCaptureWorker } from '@/lib/adapters/capture-worker/capture-worker'
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import { systemClock } from '@/lib/adapters/system-clock/system-clock'
@@ -23,6 +24,7 @@ export type Container = {
 function createContainer(): Container {
   const env = parseEnv(process.env)
   mkdirSync(env.dataFolder, { recursive: true })
+  const files = createDiskFileStore(env.evidenceFolder)
   return {
     env,
     log: createLog(env.logLevel),
@@ -30,9 +32,14 @@ function createContainer(): Container {
       db: openDatabase(env.databaseFile),
       clock: systemClock,
       ids: randomIds,
-      files: createDiskFileStore(env.evidenceFolder),
+      files,
+      captures: createCaptureWorker(files),
       passwords: createArgon2Hasher(),
-      settings: { practiceName: env.practice.name, publicUrl: env.publicUrl },
+      settings: {
+        practiceName: env.practice.name,
+        publicUrl: env.publicUrl,
+        uploadLimitBytes: env.uploadLimitBytes,
+      },
     },
   }
 }

@@ -8,6 +8,7 @@ import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import type { Deps } from '@/lib/domain/deps'
 
+import { createInlineCaptureAnalyser } from './inline-capture-analyser'
 import { createQuickHasher } from './quick-hasher'
 
 /** A clock that stands still until a test moves it. */
@@ -35,13 +36,19 @@ export async function openTestPortal(): Promise<TestPortal> {
       now += milliseconds
     },
   }
+  const files = createDiskFileStore(path.join(folder, 'files'))
   const deps: Deps = {
     db,
     clock,
     ids: randomIds,
-    files: createDiskFileStore(path.join(folder, 'files')),
+    files,
+    captures: createInlineCaptureAnalyser(files),
     passwords: createQuickHasher(),
-    settings: { practiceName: 'Tarn Hollow EMC', publicUrl: 'http://localhost:3000' },
+    settings: {
+      practiceName: 'Tarn Hollow EMC',
+      publicUrl: 'http://localhost:3000',
+      uploadLimitBytes: 64 * 1024 * 1024,
+    },
     request: { id: 'test-request', address: '192.0.2.1', browserSecret: 'browser-of-the-test' },
   }
   const close = async () => {

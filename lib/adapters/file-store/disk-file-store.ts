@@ -25,6 +25,7 @@ export function createDiskFileStore(folder: string): FileStore {
       return written.value
     },
     read: async (id) => readFile(pathOf(id)),
+    readPart: (id, start, length) => readPart(pathOf(id), start, length),
     stream: (id) => readStream(pathOf(id)),
     remove: async (id) => rm(pathOf(id), { force: true }),
   }
@@ -104,6 +105,22 @@ function streamOf(bytes: Uint8Array): ReadableStream<Uint8Array> {
       controller.close()
     },
   })
+}
+
+async function readPart(file: string, start: number, length: number): Promise<Uint8Array> {
+  const handle = await open(file, 'r')
+  try {
+    const bytes = new Uint8Array(length)
+    let filled = 0
+    while (filled < length) {
+      const { bytesRead } = await handle.read(bytes, filled, length - filled, start + filled)
+      if (bytesRead === 0) break
+      filled += bytesRead
+    }
+    return bytes.subarray(0, filled)
+  } finally {
+    await handle.close()
+  }
 }
 
 function readStream(file: string): ReadableStream<Uint8Array> {

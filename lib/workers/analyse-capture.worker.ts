@@ -1,0 +1,1 @@
+export { analyseCaptureFile as default } from '@/lib/adapters/capture-worker/analyse-capture-file'
