@@ -1,0 +1,86 @@
+import {
+  complex,
+  divide,
+  exponential,
+  exponentialMean,
+  multiply,
+  scale,
+  type Complex,
+} from '../linear/complex'
+import { derivativeOf, valueAt, type Polynomial } from '../linear/polynomial'
+import { rootsOf } from '../linear/roots'
+
+/** One exponential of a response, c·exp(p t). */
+export type Mode = { readonly pole: Complex; readonly weight: Complex }
+
+/**
+ * The response of a linear network to a source that rises from 0 to 1 on a straight line of duration `edge` and stays:
+ * on the edge offset + slope·t + Σ c exp(p t), afterwards final + Σ c exp(p (t − edge)). Normalised time.
+ */
+export type EdgeResponse = {
+  readonly edge: number
+  readonly onEdge: { readonly offset: number; readonly slope: number; readonly modes: readonly Mode[] }
+  readonly after: { readonly final: number; readonly modes: readonly Mode[] }
+}
+
+/**
+ * Partial fractions of N(s)/(s D(s)) give the step response a0 + Σ R exp(p t) with R = N(p)/(p D′(p)); its running mean
+ * over the edge is the ramp response. An edge of 0 is the ideal step. Exact to rounding as long as no two poles agree
+ * to better than about 1e-6.
+ */
+export function edgeResponse(numerator: Polynomial, denominator: Polynomial, edge: number): EdgeResponse {
+  const slopeOfD = derivativeOf(denominator)
+  const final = (numerator[0] ?? 0) / (denominator[0] ?? 1)
+  const step = rootsOf(denominator).map((pole) => ({
+    pole,
+    weight: divide(valueAt(numerator, pole), multiply(pole, valueAt(slopeOfD, pole))),
+  }))
+  const after = step.map(({ pole, weight }) => ({
+    pole,
+    weight: multiply(weight, exponentialMean(scale(pole, edge))),
+  }))
+  if (edge === 0) return { edge, onEdge: { offset: 0, slope: 0, modes: [] }, after: { final, modes: after } }
+  const onEdge = step.map(({ pole, weight }) => ({ pole, weight: divide(weight, scale(pole, edge)) }))
+  const offset = -onEdge.reduce((sum, mode) => sum + mode.weight.re, 0)
+  return { edge, onEdge: { offset, slope: final / edge, modes: onEdge }, after: { final, modes: after } }
+}
+
+/** The response at a normalised time; 0 before the edge begins. */
+export function valueOf(response: EdgeResponse, time: number): number {
+  if (time < 0) return 0
+  const { edge, onEdge, after } = response
+  if (time < edge) return onEdge.offset + onEdge.slope * time + sumOf(onEdge.modes, time)
+  return after.final + sumOf(after.modes, time - edge)
+}
+
+function sumOf(modes: readonly Mode[], time: number): number {
+  let sum = 0
+  for (const { pole, weight } of modes) sum += multiply(weight, exponential(scale(pole, time))).re
+  return sum
+}
+
+/** ∫ of the squared response from the beginning of the edge to infinity; the final value must be 0. */
+export function squareIntegral(response: EdgeResponse): number {
+  const { edge, onEdge, after } = response
+  // A current through capacitors has no slope on the edge: an offset and exponentials only.
+  const constant: Mode = { pole: complex(0), weight: complex(onEdge.offset) }
+  const during = productIntegral([constant, ...onEdge.modes], edge)
+  return during + productIntegral(after.modes, Infinity)
+}
+
+function productIntegral(modes: readonly Mode[], duration: number): number {
+  if (duration === 0) return 0
+  let sum = 0
+  for (const a of modes) {
+    for (const b of modes) {
+      const pole = complex(a.pole.re + b.pole.re, a.pole.im + b.pole.im)
+      const weight = multiply(a.weight, b.weight)
+      const span =
+        duration === Infinity
+          ? divide(complex(-1), pole)
+          : scale(exponentialMean(scale(pole, duration)), duration)
+      sum += multiply(weight, span).re
+    }
+  }
+  return sum
+}

@@ -1,0 +1,79 @@
+import { minimiseOn } from '../linear/minimise'
+import { edgeResponse } from './edge-response'
+import { peakOf } from './edge-measures'
+import { leastDamping, polesOf } from './modes'
+import { angularFrequency, characteristicImpedance, normalise, type SwitchNode } from './network'
+
+type BareNode = Omit<SwitchNode, 'snubber'>
+
+/** Between these multiples of Z0 both optima lie for every k from 0.05 to 200. */
+const searchRange = { low: 0.05, high: 40 }
+
+export const withSnubber = (node: BareNode, resistance: number, capacitance: number): SwitchNode => ({
+  inductance: node.inductance,
+  capacitance: node.capacitance,
+  seriesResistance: node.seriesResistance,
+  snubber: { resistance, capacitance },
+})
+
+/** The overshoot as a fraction of the step, for a straight edge of the given duration in seconds. */
+export function overshootOf(node: SwitchNode, edgeDuration: number): number {
+  const { nodeVoltage, denominator } = normalise(node)
+  const response = edgeResponse(nodeVoltage, denominator, edgeDuration * angularFrequency(node))
+  return peakOf(response, polesOf(node)).value - 1
+}
+
+/**
+ * The Rs with the least overshoot for a given Cs, by search over the exact response to the given edge; no closed form
+ * is known.
+ */
+export function leastOvershootResistance(node: BareNode, capacitance: number, edgeDuration = 0): number {
+  const z0 = characteristicImpedance(node)
+  const overshootAt = (logRho: number) =>
+    overshootOf(withSnubber(node, Math.exp(logRho) * z0, capacitance), edgeDuration)
+  return Math.exp(bestOf(overshootAt)) * z0
+}
+
+/**
+ * The Rs with the largest least damping ratio for a given Cs. Without series resistance it is in closed form
+ *
+ *     Rs = Z0 (1 + k)^(3/4)/k,   ζ = (√(1 + k) − 1)/2,   k = Cs/Cpar ≤ 8
+ *
+ * For k > 8 a whole interval of Rs gives three real poles; its geometric middle is found by search, as is the optimum
+ * with series resistance. Derived for this network; checked against a numeric search of the poles.
+ */
+export function mostDampingResistance(node: BareNode, capacitance: number): number {
+  const z0 = characteristicImpedance(node)
+  const k = capacitance / node.capacitance
+  if (node.seriesResistance === 0 && k <= 8) return (z0 * (1 + k) ** 0.75) / k
+  const dampingAt = (logRho: number) => leastDamping(withSnubber(node, Math.exp(logRho) * z0, capacitance))
+  const best = bestOf((logRho) => -dampingAt(logRho))
+  if (dampingAt(best) < 1 - 1e-9) return Math.exp(best) * z0
+  return Math.exp(middleOfRealInterval((logRho) => dampingAt(logRho) >= 1 - 1e-9, best)) * z0
+}
+
+/** Coarse scan, then golden section around the best point. */
+function bestOf(objective: (logRho: number) => number): number {
+  const low = Math.log(searchRange.low)
+  const step = (Math.log(searchRange.high) - low) / 120
+  let best = low
+  for (let index = 1; index <= 120; index += 1) {
+    const candidate = low + index * step
+    if (objective(candidate) < objective(best)) best = candidate
+  }
+  return minimiseOn(objective, best - step, best + step, 1e-9)
+}
+
+function middleOfRealInterval(isReal: (logRho: number) => boolean, inside: number): number {
+  const edgeTowards = (direction: 1 | -1) => {
+    let near = inside
+    let far = inside + direction
+    for (let halving = 0; halving < 50; halving += 1) {
+      const middle = (near + far) / 2
+      if (isReal(middle)) near = middle
+      else far = middle
+    }
+    return near
+  }
+  return (edgeTowards(-1) + edgeTowards(1)) / 2
+}

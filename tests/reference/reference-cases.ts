@@ -1,0 +1,44 @@
+import { readFileSync } from 'node:fs'
+
+import { expect } from 'vitest'
+import { z } from 'zod'
+
+const caseSchema = z.object({
+  id: z.string(),
+  topic: z.string(),
+  inputs: z.record(z.string(), z.unknown()),
+  expected: z.record(z.string(), z.unknown()),
+  tolerance_rel: z.number(),
+  tolerance_rel_by_output: z.record(z.string(), z.number()).default({}),
+  how_computed: z.string(),
+  expect_error: z.boolean().default(false),
+})
+
+/** A result that was computed outside the project, with the means by which it was computed. */
+export type ReferenceCase = z.infer<typeof caseSchema>
+
+/** The cases of one topic in a file beside this one. */
+export function referenceCases(file: string, topic: string): ReferenceCase[] {
+  const text = readFileSync(new URL(file, import.meta.url), 'utf8')
+  const { cases } = z.object({ cases: z.array(caseSchema) }).parse(JSON.parse(text))
+  const found = cases.filter((item) => item.topic === topic)
+  if (found.length === 0) throw new Error(`No reference case about ${topic}`)
+  return found
+}
+
+/** Compares what was got with what is expected of a case, each output within its own relative tolerance. */
+export function expectWithin(item: ReferenceCase, got: Readonly<Record<string, number>>): void {
+  for (const [key, value] of Object.entries(got)) {
+    const expected = z.number().parse(item.expected[key])
+    const tolerance = item.tolerance_rel_by_output[key] ?? item.tolerance_rel
+    const difference = Math.abs(value - expected)
+    expect(difference, `${item.id} ${key}: ${value} for ${expected}`).toBeLessThanOrEqual(
+      tolerance * Math.abs(expected) + 1e-300,
+    )
+  }
+}
+
+/** A number among the inputs of a case. */
+export function input(item: ReferenceCase, key: string): number {
+  return z.number().parse(item.inputs[key])
+}
