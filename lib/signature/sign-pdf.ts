@@ -5,6 +5,7 @@ import { PDFDocument } from '@cantoo/pdf-lib'
 import { err, ok, type Result } from '@/lib/core/result'
 
 import { isIssuedBy, readCertificate } from './certificates/certificate-facts'
+import { fieldPlace, isOverlapping } from './pdf/field-place'
 import { pageObjects } from './pdf/page-list'
 import type { PdfFile } from './pdf/pdf-file'
 import { readPdfFile } from './pdf/read-pdf-file'
@@ -19,7 +20,7 @@ import { LARGEST_BLOCK, type SignatureRequest } from './signing/signature-reques
  * signature over the whole file as it then is. Earlier bytes, and so earlier signatures, stay as they are; call it
  * again for the next signer. Equal inputs give equal bytes but for the random part of the ECDSA signature.
  *
- * Errors: those of `readPdfFile`; `field_exists`, `no_such_page`, `block_outside_page`, `block_too_small`,
+ * Errors: those of `readPdfFile`; `field_exists`, `no_such_page`, `block_taken`, `block_outside_page`, `block_too_small`,
  * `character_missing`, `certificate_unusable`.
  * Sources: ISO 32000-1:2008, 12.8; ETSI EN 319 142-1 (baseline signatures in PDF).
  */
@@ -55,13 +56,25 @@ export async function signPdf(
 
 function problemWithPlace(file: PdfFile, request: SignatureRequest): SignPdfError | null {
   const { field, block } = request
-  if (formFields(file)?.some(({ name }) => name === field)) {
+  const fields = formFields(file)
+  const pages = pageObjects(file)
+  if (!fields || !pages)
+    return { code: 'unreadable', message: 'The pages or fields of this PDF cannot be read.' }
+  if (fields.some(({ name }) => name === field)) {
     return { code: 'field_exists', message: `This report already holds the signature "${field}".` }
   }
-  if (pageObjects(file)?.[block.page] === undefined) {
+  const page = pages[block.page]
+  if (page === undefined) {
     return {
       code: 'no_such_page',
       message: `This report has no page ${block.page + 1} to put the signature on.`,
+    }
+  }
+  const places = fields.map(({ dictionary }) => fieldPlace(dictionary)).filter((place) => place !== null)
+  if (places.some((place) => isOverlapping(place, { page, rectangle: block.rectangle }))) {
+    return {
+      code: 'block_taken',
+      message: `Another signature already stands where "${field}" would go; move it.`,
     }
   }
   const { width, height } = block.rectangle

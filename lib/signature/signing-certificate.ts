@@ -26,14 +26,12 @@ import {
   SIGNATURE_ALGORITHM,
   toIssuedCertificate,
 } from './certificates/issued-certificate'
+import { SIGNING_KEY_USAGES } from './certificates/signing-key-usages'
 
 export type SigningCertificateError =
   CertificateNameError | { readonly code: 'email_unusable' | 'authority_not_valid'; readonly message: string }
 
 type Authority = Pick<IssuedCertificate, 'certificateDer' | 'privateKeyPkcs8'>
-
-/** id-kp-documentSigning (RFC 9336) and id-kp-emailProtection (RFC 5280, 4.2.1.12). */
-export const SIGNING_KEY_USAGES = ['1.3.6.1.5.5.7.3.36', '1.3.6.1.5.5.7.3.4'] as const
 
 /**
  * Issues a person's signing certificate with a new P-256 key: subject name, e-mail address, random serial number, use

@@ -1,11 +1,12 @@
 import { type CertificateFacts, readCertificate } from './certificates/certificate-facts'
+import { fieldPlace } from './pdf/field-place'
 import { pageObjects } from './pdf/page-list'
 import type { PdfFile } from './pdf/pdf-file'
 import { DEFAULT_MAXIMUM_BYTES, readPdfFile } from './pdf/read-pdf-file'
 import { type FormField, formFields } from './pdf/signature-fields'
 import { checkCertificate } from './verifying/check-certificate'
 import { checkContainer } from './verifying/check-container'
-import { checkField, pageOf } from './verifying/check-field'
+import { checkField } from './verifying/check-field'
 import { checkRevision } from './verifying/check-revision'
 import { readSignatureEntry, type SignatureEntry, type SignedField } from './verifying/signature-entry'
 import {
@@ -86,13 +87,14 @@ function checkSignature(file: PdfFile, entry: SignatureEntry, around: Surroundin
   const { previous, pages, fields, authority, input } = around
   const expected = input.expected.find(({ field }) => field === entry.field.name)
   const { certificates, checks } = checkContainer(file, entry)
+  const page = pages.indexOf(fieldPlace(entry.field.dictionary)?.page ?? -1)
   return {
     field: entry.field.name,
     signerName: certificates?.signer.commonName ?? null,
     fingerprint: certificates?.signer.fingerprint ?? null,
     signedAt: entry.signedAt,
     reason: entry.reason,
-    page: pageOf(entry.field.dictionary, pages),
+    page: page < 0 ? null : page,
     coversWholeFileAtItsRevision: entry.revision !== null,
     checks: [
       checkField(file, entry, pages, fields, expected),

@@ -6,6 +6,7 @@ export type SignPdfError =
       readonly code:
         | 'field_exists'
         | 'no_such_page'
+        | 'block_taken'
         | 'block_outside_page'
         | 'block_too_small'
         | 'character_missing'

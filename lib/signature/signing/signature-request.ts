@@ -1,10 +1,4 @@
-/** A rectangle on a page in points (1/72 inch), from the lower left corner of the page. */
-export type Rectangle = {
-  readonly x: number
-  readonly y: number
-  readonly width: number
-  readonly height: number
-}
+import type { Rectangle } from '../pdf/field-place'
 
 /** The largest visible block: it may stand beside the report's text, never replace a page of it. */
 export const LARGEST_BLOCK = { width: 400, height: 160 } as const

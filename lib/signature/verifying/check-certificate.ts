@@ -1,5 +1,5 @@
 import { type CertificateFacts, isIssuedBy } from '../certificates/certificate-facts'
-import { SIGNING_KEY_USAGES } from '../signing-certificate'
+import { SIGNING_KEY_USAGES } from '../certificates/signing-key-usages'
 import type { ContainerOutcome } from './check-container'
 import type { SignatureEntry } from './signature-entry'
 import { check, type ExpectedSignature, type SignatureCheck } from './verdict'

@@ -1,8 +1,9 @@
+import { type FieldPlace, fieldPlace, isOverlapping } from '../pdf/field-place'
 import { findObject, type PdfFile } from '../pdf/pdf-file'
 import { typeOf } from '../pdf/page-list'
 import type { PdfDictionary, PdfValue } from '../pdf/pdf-value'
 import type { FormField } from '../pdf/signature-fields'
-import { LARGEST_BLOCK, type Rectangle } from '../signing/signature-request'
+import { LARGEST_BLOCK } from '../signing/signature-request'
 import type { SignatureEntry } from './signature-entry'
 import { check, type ExpectedSignature, type SignatureCheck } from './verdict'
 
@@ -26,20 +27,14 @@ export function checkField(
     isName(dictionary.entries.get('Subtype'), 'Widget') &&
     isName(signature.dictionary.entries.get('SubFilter'), 'ETSI.CAdES.detached') &&
     hasPlainAppearance(file, dictionary)
-  const overlaps = others.some((other) => other.name !== name && isOverlapping(dictionary, other.dictionary))
+  const place = fieldPlace(dictionary)
+  const overlaps = others.some((other) => other.name !== name && isCovering(place, other))
   return check(
     'field',
-    isPlain && !overlaps && isInPlace(dictionary, pages, expected),
+    isPlain && !overlaps && isInPlace(place, pages, expected),
     'The signature field is plain and stands in its place.',
     'The signature field holds entries that a signature of the practice never has, or its block stands in another place.',
   )
-}
-
-/** The page that a field's block says it is on, counted from 0. */
-export function pageOf(dictionary: PdfDictionary, pages: readonly number[]): number | null {
-  const page = dictionary.entries.get('P')
-  const index = page?.kind === 'reference' ? pages.indexOf(page.object) : -1
-  return index < 0 ? null : index
 }
 
 const hasOnly = (dictionary: PdfDictionary, keys: readonly string[]): boolean =>
@@ -57,41 +52,24 @@ function hasPlainAppearance(file: PdfFile, dictionary: PdfDictionary): boolean {
 }
 
 function isInPlace(
-  dictionary: PdfDictionary,
+  place: FieldPlace | null,
   pages: readonly number[],
   expected: ExpectedSignature | undefined,
 ): boolean {
-  const rectangle = rectangleOf(dictionary)
-  const page = pageOf(dictionary, pages)
-  if (!rectangle || page === null) return false
+  if (!place || !pages.includes(place.page)) return false
+  const { page, rectangle } = place
   if (!expected?.block)
     return rectangle.width <= LARGEST_BLOCK.width && rectangle.height <= LARGEST_BLOCK.height
   const wanted = expected.block.rectangle
   return (
-    page === expected.block.page &&
+    pages.indexOf(page) === expected.block.page &&
     (['x', 'y', 'width', 'height'] as const).every(
       (side) => Math.abs(rectangle[side] - wanted[side]) < PLACE_TOLERANCE,
     )
   )
 }
 
-function isOverlapping(a: PdfDictionary, b: PdfDictionary): boolean {
-  const [left, right] = [rectangleOf(a), rectangleOf(b)]
-  const [leftPage, rightPage] = [a.entries.get('P'), b.entries.get('P')]
-  if (!left || !right || leftPage?.kind !== 'reference' || rightPage?.kind !== 'reference') return false
-  return (
-    leftPage.object === rightPage.object &&
-    left.x < right.x + right.width &&
-    right.x < left.x + left.width &&
-    left.y < right.y + right.height &&
-    right.y < left.y + left.height
-  )
-}
-
-function rectangleOf(dictionary: PdfDictionary): Rectangle | null {
-  const value = dictionary.entries.get('Rect')
-  if (value?.kind !== 'array' || value.items.length !== 4) return null
-  const [x, y, right, top] = value.items.map((item) => (item.kind === 'number' ? item.value : NaN))
-  if (x === undefined || y === undefined || right === undefined || top === undefined) return null
-  return right > x && top > y ? { x, y, width: right - x, height: top - y } : null
+function isCovering(place: FieldPlace | null, other: FormField): boolean {
+  const otherPlace = fieldPlace(other.dictionary)
+  return place !== null && otherPlace !== null && isOverlapping(place, otherPlace)
 }

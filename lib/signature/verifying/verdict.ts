@@ -1,5 +1,5 @@
+import type { Rectangle } from '../pdf/field-place'
 import type { PdfFileError } from '../pdf/read-pdf-file'
-import type { Rectangle } from '../signing/signature-request'
 
 /** One signature that the report must carry, as the portal recorded it when it was made. */
 export type ExpectedSignature = {

@@ -79,7 +79,7 @@ describe('signing a report', () => {
     [
       'a block over the whole page',
       'block_outside_page',
-      { rectangle: { x: 0, y: 0, width: 595, height: 842 } },
+      { page: 0, rectangle: { x: 0, y: 0, width: 595, height: 842 } },
     ],
     ['text that does not fit', 'block_too_small', { lines: ['x'.repeat(200)] }],
     ['a character that the font lacks', 'character_missing', { lines: ['署名'] }],

@@ -1,6 +1,7 @@
-import { PDFDocument, PDFName } from '@cantoo/pdf-lib'
+import { PDFDocument, PDFName, PDFRef } from '@cantoo/pdf-lib'
 import { beforeAll, describe, expect, it } from 'vitest'
 
+import { signPdf } from '@/lib/signature/sign-pdf'
 import { issueSigningCertificate } from '@/lib/signature/signing-certificate'
 import { verifyPdf } from '@/lib/signature/verify-pdf'
 import type { ProblemCode } from '@/lib/signature/verifying/verdict'
@@ -102,6 +103,16 @@ describe('verifying a signed report', () => {
       document.catalog.set(PDFName.of('OpenAction'), document.context.obj({ S: 'JavaScript' }))
     })
     expectProblem(signed, 'changes', /object \d+ was changed/)
+  })
+
+  it('notices content that the first signer signed as missing and the second one fills in', async () => {
+    const prepared = await updateWith(await createReport(), (document) => {
+      const missing = Array.from({ length: 200 }, (_, index) => PDFRef.of(index + 20))
+      document.getPage(0).node.set(PDFName.of('PieceInfo'), document.context.obj(missing))
+    })
+    const first = valueOf(await signPdf(prepared, requestFor(scene, 'author')))
+    const second = valueOf(await signPdf(first, requestFor(scene, 'reviewer')))
+    expectProblem(second, 'changes', /content that an earlier state had left open was filled in/)
   })
 
   it('BZ3: notices text that was added after the last signature', async () => {
