@@ -3,6 +3,7 @@ import { lineStyle } from '@/lib/figure/line-style'
 
 const Sample = ({ entry }: { readonly entry: KeyEntry }) => {
   if (entry.role === 'mark') return <path d="M0 5H28" strokeDasharray="1.5 3" className="figure-mark" />
+  if (entry.role === 'point') return <circle cx={14} cy={5} r={3.5} className="figure-point" />
   const style = lineStyle(entry.role, entry.rank)
   return (
     <path

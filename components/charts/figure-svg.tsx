@@ -13,7 +13,7 @@ type FigureSvgProps = {
 
 /** Two layouts of the same figure, so that the type stays readable on a phone; the screen's width shows one. */
 const wideSize = { width: 760, height: 400, textSize: 13 }
-const narrowSize = { width: 380, height: 320, textSize: 13 }
+const narrowSize = { width: 330, height: 300, textSize: 13 }
 
 /** A figure on the page: drawing, caption and a table of its values. */
 export const FigureSvg = ({ figure, number }: FigureSvgProps) => {

@@ -16,9 +16,13 @@ type PageHeaderProps = {
 
 /** The head of a page on a band of the 5 mm rule: where we are, what it is, what can be done. */
 export const PageHeader = ({ title, crumbs, lead, meta, actions, tabs }: PageHeaderProps) => (
-  <div className={tabs ? 'bench-grid' : 'bench-grid border-b border-rule'}>
+  <div className="bench-grid border-b border-rule-strong">
     <div className="mx-auto max-w-page px-4 pt-5 sm:px-6">
-      {crumbs ? <Breadcrumbs crumbs={crumbs} /> : null}
+      {crumbs ? (
+        <div className="mb-1.5">
+          <Breadcrumbs crumbs={crumbs} />
+        </div>
+      ) : null}
       <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-3 pb-5">
         <div className="min-w-0 max-w-3xl">
           <h1 className="text-2xl [overflow-wrap:anywhere] sm:text-3xl">{title}</h1>
@@ -27,9 +31,9 @@ export const PageHeader = ({ title, crumbs, lead, meta, actions, tabs }: PageHea
             <div className="mt-2.5 flex flex-wrap items-center gap-x-5 gap-y-1 text-sm">{meta}</div>
           ) : null}
         </div>
-        {actions ? <div className="flex flex-wrap gap-3">{actions}</div> : null}
+        {actions ? <div className="no-print flex flex-wrap gap-3">{actions}</div> : null}
       </div>
-      {tabs}
+      {tabs ? <div className="-mt-1 [&>nav]:border-b-0">{tabs}</div> : null}
     </div>
   </div>
 )

@@ -8,11 +8,6 @@ export const Breadcrumbs = ({ crumbs }: { readonly crumbs: readonly Crumb[] }) =
     <ol className="flex flex-wrap text-sm text-ink-soft">
       {crumbs.map((crumb, index) => (
         <li key={crumb.href ?? crumb.label} className="flex items-center">
-          {index > 0 ? (
-            <span aria-hidden="true" className="px-2 text-ink-faint">
-              /
-            </span>
-          ) : null}
           {crumb.href ? (
             <Link href={crumb.href} className="text-link inline-block py-0.5">
               {crumb.label}
@@ -20,6 +15,11 @@ export const Breadcrumbs = ({ crumbs }: { readonly crumbs: readonly Crumb[] }) =
           ) : (
             <span aria-current="page">{crumb.label}</span>
           )}
+          {index < crumbs.length - 1 ? (
+            <span aria-hidden="true" className="px-2 text-ink-faint">
+              /
+            </span>
+          ) : null}
         </li>
       ))}
     </ol>

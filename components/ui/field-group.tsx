@@ -17,6 +17,6 @@ export const FieldGroup = ({ legend, hint, columns = 1, children }: FieldGroupPr
   <fieldset className="min-w-0 border-t border-rule-strong pt-3">
     <legend className="pr-3 font-serif text-lg font-semibold">{legend}</legend>
     {hint ? <p className="mb-3 max-w-measure text-sm text-ink-soft">{hint}</p> : null}
-    <div className={classNames('grid items-end gap-x-6 gap-y-4', widths[columns])}>{children}</div>
+    <div className={classNames('field-grid', widths[columns])}>{children}</div>
   </fieldset>
 )

@@ -12,13 +12,13 @@ type Props = FieldProps & {
 export const Field = ({ id, name, label, hint, error, optional, children }: Props) => {
   const controlId = id ?? name
   return (
-    <div className="flex flex-col gap-1">
+    <div className="field">
       <label htmlFor={controlId} className="text-sm font-semibold">
         {label}
         {optional ? <span className="font-normal text-ink-faint"> (optional)</span> : null}
       </label>
       {hint ? (
-        <p id={`${controlId}-hint`} className="text-sm text-ink-soft">
+        <p id={`${controlId}-hint`} className="field-hint text-sm text-ink-soft">
           {hint}
         </p>
       ) : null}

@@ -36,7 +36,7 @@ export const FormErrorSummary = ({
         {errors.map((error) => (
           <li key={`${error.fieldId ?? ''}${error.message}`}>
             {error.fieldId ? (
-              <a href={`#${error.fieldId}`} className="text-link">
+              <a href={`#${error.fieldId}`} className="text-link inline-block py-0.5">
                 {error.message}
               </a>
             ) : (

@@ -17,7 +17,7 @@ export const Minutes = ({ minutes }: { readonly minutes: number }) => {
   return (
     <span className="num">
       {parts.map((part, index) => (
-        <span key={index} className={index % 2 === 1 ? 'unit text-[1em]' : undefined}>
+        <span key={index} className={index % 2 === 1 ? 'unit' : undefined}>
           {index > 0 ? noBreak : ''}
           {part}
         </span>

@@ -32,7 +32,7 @@ export const OpenNumber = ({ label, value, unit, interval, ...origin }: OpenNumb
       summary={
         <span className="flex flex-wrap items-baseline justify-between gap-x-6">
           <span>{label}</span>
-          <span className="flex flex-wrap items-baseline gap-x-3">
+          <span className="ml-auto flex flex-wrap items-baseline justify-end gap-x-3">
             {interval ? <span className="num text-sm text-ink-soft">{`95 %: ${interval}`}</span> : null}
             <Quantity value={value} unit={unit} />
           </span>

@@ -27,7 +27,7 @@ export const QuantityField = ({
   const unitId = `${control.id}-unit`
   return (
     <Field {...field}>
-      <span className="relative block">
+      <span className="entry-frame relative block">
         <input
           type="text"
           inputMode="text"

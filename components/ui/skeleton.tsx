@@ -14,7 +14,7 @@ export const Skeleton = ({ label, lines = 4 }: SkeletonProps) => (
       <div
         key={index}
         aria-hidden="true"
-        className={`h-3 animate-pulse bg-rule ${widths[index % widths.length] ?? ''}`}
+        className={`h-2 animate-pulse bg-rule ${widths[index % widths.length] ?? ''}`}
       />
     ))}
   </div>

@@ -14,7 +14,7 @@ const shapes: Record<StatusKind, { tone: string; shape: ReactNode }> = {
   },
   'over-limit': {
     tone: 'text-over-limit',
-    shape: <path d="M1 4.5H11M6 11V5M3 7L6 1L9 7Z" {...outline} fill="currentColor" strokeWidth={1} />,
+    shape: <path d="M0.5 9.5H11.5V11.5H0.5ZM1.5 7.5L6 0.5L10.5 7.5Z" fill="currentColor" />,
   },
   attention: { tone: 'text-copper', shape: <path d="M6 1L11 6L6 11L1 6Z" fill="currentColor" /> },
   active: { tone: 'text-ink', shape: <circle cx="6" cy="6" r="4.5" fill="currentColor" /> },

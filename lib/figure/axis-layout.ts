@@ -1,16 +1,13 @@
 import type { Axis } from '@/lib/core/figure/figure'
 
 import type { AxisScale } from './axis-scale'
+import { quantityOverUnit } from './axis-title'
 import { linearTicks, logTicks, type AxisTicks, type Tick } from './axis-ticks'
 import type { AxisLayout, GridLine, PlacedText, Rect } from './layout'
 import { textWidth } from './text-width'
 
 export const ticksFor = (axis: Axis, domain: readonly [number, number], count: number): AxisTicks =>
   axis.scale === 'log' ? logTicks(domain, axis.unit, count) : linearTicks(domain, axis.unit, count)
-
-/** "Time / ns": the quantity divided by its unit, as the SI Brochure (5.4.1) writes it on axes. */
-export const axisTitle = (axis: Axis, ticks: AxisTicks): string =>
-  ticks.titleUnit ? `${axis.label} / ${ticks.titleUnit}` : axis.label
 
 /** Keeps the ticks, best rank first, whose text stays clear of those kept before it. */
 const clearTicks = (ticks: readonly Tick[], spanOf: (tick: Tick) => readonly [number, number]): Tick[] => {
@@ -44,7 +41,7 @@ export const layoutX = (
   })
   return {
     title: {
-      text: axisTitle(axis, ticks),
+      text: quantityOverUnit(axis.label, ticks.titleUnit),
       x: plot.x + plot.width / 2,
       y: bottom + size * 3,
       anchor: 'middle',
@@ -74,7 +71,7 @@ export const layoutY = (
   })
   return {
     title: {
-      text: axisTitle(axis, ticks),
+      text: quantityOverUnit(axis.label, ticks.titleUnit),
       x: size,
       y: plot.y + plot.height / 2,
       anchor: 'middle',

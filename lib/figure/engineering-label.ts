@@ -55,3 +55,21 @@ export const roundLabel = (value: number, unit: string): string => {
   const digits = Number((value / 10 ** scale.exponent).toPrecision(6)).toString()
   return [digits.replace('-', '−'), scale.unit].filter(Boolean).join('\u00a0')
 }
+
+/** Labels for a column of values that are read against each other: one prefix for all, as many decimals as the largest needs. */
+export const columnLabels = (
+  values: readonly number[],
+  unit: string,
+  significant = 4,
+): EngineeringLabel[] => {
+  const finite = values.filter(Number.isFinite)
+  const largest = finite.reduce((most, value) => Math.max(most, Math.abs(value)), 0)
+  const scale = engineeringScale(Number(largest.toPrecision(significant)), unit)
+  const factor = 10 ** scale.exponent
+  const digits = largest > 0 ? Math.floor(Math.log10(largest / factor) + 1e-12) : 0
+  const decimals = Math.max(0, significant - 1 - digits)
+  return values.map((value) => ({
+    number: Number.isFinite(value) ? plainNumber(value / factor, decimals) : '–',
+    unit: scale.unit,
+  }))
+}

@@ -32,7 +32,9 @@ const keyOf = (figure: Figure, lines: readonly LineLayout[], marks: readonly Dra
     return line.path !== '' && line.label === null ? [{ role: line.role, rank: line.rank, text }] : []
   }),
   ...marks.flatMap(({ mark, layout }) =>
-    layout.label === null ? [{ role: 'mark' as const, rank: 0, text: mark.label }] : [],
+    layout.label === null
+      ? [{ role: mark.kind === 'point' ? ('point' as const) : ('mark' as const), rank: 0, text: mark.label }]
+      : [],
   ),
 ]
 

@@ -45,7 +45,7 @@ export type MarkLayout = {
 }
 
 export type KeyEntry = {
-  readonly role: SeriesRole | 'mark'
+  readonly role: SeriesRole | 'mark' | 'point'
   readonly rank: number
   readonly text: string
 }

@@ -40,14 +40,14 @@ const takeBest = (space: LabelSpace, text: string, candidates: readonly Candidat
     if (!contains(space.plot, candidate.box)) continue
     if (space.taken.some((other) => overlaps(other, candidate.box))) continue
     const crossed = space.lines.reduce((sum, runs) => sum + crossedWidth(runs, candidate.box), 0)
-    const cost = candidate.penalty + (4 * crossed) / candidate.box.width
+    const cost = candidate.penalty + (crossed > 0 ? 2 + (8 * crossed) / candidate.box.width : 0)
     if (cost < bestCost - 1e-9) {
       best = candidate
       bestCost = cost
     }
   }
-  // Past this cost the text would stand in the middle of other lines: better below the plot.
-  if (!best || bestCost > 5) return null
+  // Past this cost the text would cover too much of the lines: better below the plot.
+  if (!best || bestCost > 4) return null
   space.taken.push(best.box)
   return labelIn(space, text, best.box)
 }
@@ -98,7 +98,23 @@ export const labelInstant = (space: LabelSpace, text: string, x: number): Placed
 
 const positions = 24
 
-/** On its own line: just above, or just below, all of the line that the text spans; nearer the right end is better. */
+/** From 0, where every other line keeps well away from this stretch, to 1 where one runs along or across it. */
+const confusion = (space: LabelSpace, own: Runs, stretch: Rect): number => {
+  const clearance = space.textSize * 2.5
+  const closeness = space.lines.map((other) => {
+    if (other === own) return 0
+    const extent = extentBetween(other, stretch.x, stretch.x + stretch.width, space.plot)
+    if (!extent) return 0
+    const distance = Math.max(extent[0] - stretch.y - stretch.height, stretch.y - extent[1], 0)
+    return Math.max(0, 1 - distance / clearance)
+  })
+  return Math.max(0, ...closeness)
+}
+
+/**
+ * On its own line: just above, or just below, all of the line that the text spans. Better nearer the right end, and
+ * where no other line runs close by that the name could be taken for.
+ */
 export const labelLine = (space: LabelSpace, text: string, runs: Runs): PlacedLabel | null => {
   const { plot } = space
   const size = boxFor(space, text, 0, 0)
@@ -110,7 +126,8 @@ export const labelLine = (space: LabelSpace, text: string, runs: Runs): PlacedLa
     if (!extent) return []
     // A label that must clear a tall swing stands far from most of its line: it costs.
     const height = (extent[1] - extent[0]) / size.height
-    const penalty = (1.2 * index) / positions + 0.25 * height
+    const stretch = { x: left, y: extent[0], width: size.width, height: extent[1] - extent[0] }
+    const penalty = (1.2 * index) / positions + 0.25 * height + 2 * confusion(space, runs, stretch)
     return [
       { box: boxFor(space, text, left, extent[0] - gap(space)), penalty },
       { box: boxFor(space, text, left, extent[1] + gap(space) + size.height), penalty: penalty + 0.15 },

@@ -1,6 +1,6 @@
 import type { Axis, Figure, Series } from '@/lib/core/figure/figure'
 
-import { engineeringLabel, type EngineeringLabel } from './engineering-label'
+import { columnLabels, engineeringLabel, type EngineeringLabel } from './engineering-label'
 
 export type ValueRow = { readonly x: EngineeringLabel; readonly y: EngineeringLabel; readonly note: string }
 
@@ -31,13 +31,29 @@ const selection = (length: number, most: number, extremes: readonly number[]): n
   return [...new Set([...even, ...extremes.filter((index) => index >= 0)])].sort((a, b) => a - b)
 }
 
+/** Values of a linear axis are compared with each other; those of a logarithmic axis span too much for one prefix. */
+const labelsFor = (axis: Axis, values: readonly number[]): EngineeringLabel[] =>
+  axis.scale === 'log'
+    ? values.map((value) => engineeringLabel(value, axis.unit))
+    : columnLabels(values, axis.unit)
+
 const tableOf = (series: Series, x: Axis, y: Axis, most: number): ValueTable => {
   const highest = indexOfExtreme(series.y, (a, b) => a > b)
   const lowest = indexOfExtreme(series.y, (a, b) => a < b)
   const noteFor = (index: number) => (index === highest ? 'highest' : index === lowest ? 'lowest' : '')
-  const rows = selection(series.x.length, most, [highest, lowest]).map((index) => ({
-    x: engineeringLabel(series.x[index] ?? NaN, x.unit),
-    y: engineeringLabel(series.y[index] ?? NaN, y.unit),
+  const chosen = selection(series.x.length, most, [highest, lowest])
+  const nothing: EngineeringLabel = { number: '–', unit: '' }
+  const xLabels = labelsFor(
+    x,
+    chosen.map((index) => series.x[index] ?? NaN),
+  )
+  const yLabels = labelsFor(
+    y,
+    chosen.map((index) => series.y[index] ?? NaN),
+  )
+  const rows = chosen.map((index, row) => ({
+    x: xLabels[row] ?? nothing,
+    y: yLabels[row] ?? nothing,
     note: noteFor(index),
   }))
   return { id: series.id, label: series.label, rows, total: series.x.length }

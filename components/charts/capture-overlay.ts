@@ -1,0 +1,79 @@
+import type uPlot from 'uplot'
+
+import type { TimeWindow } from '@/lib/figure/time-window'
+
+import type { CaptureMarker } from './capture-points'
+
+export type OverlayView = { readonly cursors: TimeWindow; readonly markers: readonly CaptureMarker[] }
+
+export type OverlayLook = {
+  readonly cursor: string
+  readonly marker: string
+  readonly paper: string
+  readonly font: string
+}
+
+type Flag = {
+  readonly x: number
+  readonly label: string
+  readonly colour: string
+  readonly dash: number[]
+  readonly row: number
+}
+
+/** Canvas pixels to one CSS pixel. */
+export const pixelRatio = (plot: uPlot): number => plot.ctx.canvas.width / plot.width
+
+/** Where the line of a flag stands, in canvas pixels; null outside the view. */
+const positionOf = (plot: uPlot, flag: Flag): number | null => {
+  const at = Math.round(plot.valToPos(flag.x, 'x', true)) + 0.5
+  return at < plot.bbox.left || at > plot.bbox.left + plot.bbox.width ? null : at
+}
+
+const drawLine = (plot: uPlot, flag: Flag) => {
+  const { ctx, bbox } = plot
+  const at = positionOf(plot, flag)
+  if (at === null) return
+  const scale = pixelRatio(plot)
+  ctx.strokeStyle = flag.colour
+  ctx.lineWidth = 1.25 * scale
+  ctx.setLineDash(flag.dash.map((length) => length * scale))
+  ctx.beginPath()
+  ctx.moveTo(at, bbox.top)
+  ctx.lineTo(at, bbox.top + bbox.height)
+  ctx.stroke()
+}
+
+const drawName = (plot: uPlot, flag: Flag, paper: string) => {
+  const { ctx, bbox } = plot
+  const at = positionOf(plot, flag)
+  if (at === null) return
+  const scale = pixelRatio(plot)
+  const width = ctx.measureText(flag.label).width + 8 * scale
+  const height = 17 * scale
+  const left = Math.min(at, bbox.left + bbox.width - width)
+  const top = bbox.top + 2 * scale + flag.row * (height + 2 * scale)
+  ctx.fillStyle = flag.colour
+  ctx.fillRect(left, top, width, height)
+  ctx.fillStyle = paper
+  ctx.fillText(flag.label, left + 4 * scale, top + height / 2)
+}
+
+const flagsOf = (view: OverlayView, look: OverlayLook): Flag[] => [
+  ...view.markers.map((marker) => ({ ...marker, colour: look.marker, dash: [2, 3], row: 1 })),
+  { x: view.cursors.from, label: 'A', colour: look.cursor, dash: [], row: 0 },
+  { x: view.cursors.to, label: 'B', colour: look.cursor, dash: [6, 3], row: 0 },
+]
+
+/** Draws the markers of the page and the two cursors A and B, every name above every line. */
+export const drawOverlay = (plot: uPlot, view: OverlayView, look: OverlayLook): void => {
+  const { ctx } = plot
+  const flags = flagsOf(view, look)
+  ctx.save()
+  ctx.font = look.font
+  ctx.textAlign = 'left'
+  ctx.textBaseline = 'middle'
+  for (const flag of flags) drawLine(plot, flag)
+  for (const flag of flags) drawName(plot, flag, look.paper)
+  ctx.restore()
+}
