@@ -1,5 +1,6 @@
 /** The outcome of an operation that can fail in an expected way: a value, or a typed error, never an exception. */
-export type Result<T, E> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: E }
+export type Result<T, E> =
+  { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: E }
 
 export const ok = <T>(value: T): { readonly ok: true; readonly value: T } => ({ ok: true, value })
 

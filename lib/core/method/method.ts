@@ -1,0 +1,88 @@
+import type { Figure } from '../figure/figure'
+import type { Result } from '../result'
+import type { Unit } from '../units/unit'
+
+/** One value that a method takes. The form, the interface and the report are made from this. */
+export type InputDefinition = {
+  readonly label: string
+  readonly symbol: string
+  readonly unit: Unit
+  readonly help: string
+  readonly isRequired: boolean
+  readonly above?: number
+  readonly atLeast?: number
+  readonly atMost?: number
+}
+
+/** One value that a method gives, a main result or a step on the way to it. */
+export type ResultValue = {
+  readonly key: string
+  readonly label: string
+  readonly symbol: string
+  readonly unit: Unit
+  readonly value: number
+  readonly role: 'main' | 'intermediate'
+}
+
+/** A limit of the model that was checked against the very values of a run. */
+export type ValidityCheck = { readonly passed: boolean; readonly sentence: string }
+
+export type Source = {
+  readonly citation: string
+  readonly standing: 'published' | 'derived here, checked from outside' | 'common practice, no source'
+}
+
+/** Alternatives side by side; one row a choice, values in SI units. */
+export type ChoiceTable = {
+  readonly title: string
+  readonly columns: readonly { readonly label: string; readonly unit: Unit }[]
+  readonly rows: readonly (readonly number[])[]
+}
+
+export type MethodOutcome = {
+  readonly results: readonly ResultValue[]
+  readonly choices: readonly ChoiceTable[]
+  readonly validity: readonly ValidityCheck[]
+  readonly figures: readonly Figure[]
+}
+
+export type MethodError = {
+  readonly code: 'invalid_input' | 'no_solution'
+  readonly message: string
+  readonly fields: Readonly<Record<string, string>>
+}
+
+export type InputDefinitions = Readonly<Record<string, InputDefinition>>
+
+/** The values of a run in SI units; an optional input may be absent. */
+export type InputValues<Inputs extends InputDefinitions> = {
+  readonly [Key in keyof Inputs]: Inputs[Key]['isRequired'] extends true ? number : number | undefined
+}
+
+/**
+ * A method of the practice: everything that a form, a run, a figure, a report and a reference page need to know of it.
+ * A change that alters results is a new version.
+ */
+export type Method<Inputs extends InputDefinitions = InputDefinitions> = {
+  readonly id: string
+  readonly version: number
+  readonly title: string
+  readonly purpose: string
+  readonly inputs: Inputs
+  readonly formulas: readonly string[]
+  readonly notes: readonly string[]
+  readonly cautions: readonly string[]
+  readonly sources: readonly Source[]
+  readonly compute: (values: InputValues<Inputs>) => Result<MethodOutcome, MethodError>
+}
+
+/** Keeps the exact input types of a definition. */
+export const defineMethod = <const Inputs extends InputDefinitions>(method: Method<Inputs>): Method<Inputs> =>
+  method
+
+/** A refusal that names the inputs it is about. */
+export const noSolution = (message: string, ...fields: readonly string[]): MethodError => ({
+  code: 'no_solution',
+  message,
+  fields: Object.fromEntries(fields.map((field) => [field, message])),
+})
