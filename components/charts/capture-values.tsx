@@ -25,7 +25,7 @@ const chosen = (points: CapturePoints, window: TimeWindow): number[] => {
   )
 }
 
-type Row = { readonly x: Figures; readonly min: Figures; readonly max: Figures }
+type Row = { readonly key: string; readonly x: Figures; readonly min: Figures; readonly max: Figures }
 
 const rowsOf = ({ points, window, unit }: CaptureValuesProps): Row[] => {
   const indices = chosen(points, window)
@@ -33,7 +33,8 @@ const rowsOf = ({ points, window, unit }: CaptureValuesProps): Row[] => {
   const instants = columnLabels(at(points.x), 's', 5)
   const levels = columnLabels([...at(points.min), ...at(points.max)], unit)
   const nothing: Figures = { number: '–' }
-  return indices.map((_, row) => ({
+  return indices.map((index, row) => ({
+    key: index.toString(),
     x: instants[row] ?? nothing,
     min: levels[row] ?? nothing,
     max: levels[row + indices.length] ?? nothing,
@@ -53,7 +54,7 @@ export const CaptureValues = (props: CaptureValuesProps) => (
       caption={`${props.label}: evenly chosen instants of what is in view`}
       columns={columns}
       rows={rowsOf(props)}
-      rowKey={(row) => `${row.x.number}${row.x.unit ?? ''}`}
+      rowKey={(row) => row.key}
     />
   </Disclosure>
 )

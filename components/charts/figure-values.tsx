@@ -24,7 +24,7 @@ export const FigureValues = ({ figure }: { readonly figure: Figure }) => (
           }
           columns={columnsOf(figure)}
           rows={table.rows}
-          rowKey={(row) => `${row.x.number}${row.x.unit}${row.y.number}${row.note}`}
+          rowKey={(row) => row.index.toString()}
         />
       ))}
     </div>

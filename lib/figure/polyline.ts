@@ -26,9 +26,10 @@ export const clipSegment = (a: Point, b: Point, rect: Rect): readonly [Point, Po
     }
   }
   if (enter > leave) return null
+  // An end inside the plot is kept to the last bit, so that consecutive pieces join into one run.
   return [
-    [a[0] + enter * dx, a[1] + enter * dy],
-    [a[0] + leave * dx, a[1] + leave * dy],
+    enter === 0 ? a : [a[0] + enter * dx, a[1] + enter * dy],
+    leave === 1 ? b : [a[0] + leave * dx, a[1] + leave * dy],
   ]
 }
 

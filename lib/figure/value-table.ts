@@ -2,7 +2,13 @@ import type { Axis, Figure, Series } from '@/lib/core/figure/figure'
 
 import { columnLabels, engineeringLabel, type EngineeringLabel } from './engineering-label'
 
-export type ValueRow = { readonly x: EngineeringLabel; readonly y: EngineeringLabel; readonly note: string }
+export type ValueRow = {
+  /** Place in the series, from 0. */
+  readonly index: number
+  readonly x: EngineeringLabel
+  readonly y: EngineeringLabel
+  readonly note: string
+}
 
 export type ValueTable = {
   readonly id: string
@@ -52,6 +58,7 @@ const tableOf = (series: Series, x: Axis, y: Axis, most: number): ValueTable => 
     chosen.map((index) => series.y[index] ?? NaN),
   )
   const rows = chosen.map((index, row) => ({
+    index,
     x: xLabels[row] ?? nothing,
     y: yLabels[row] ?? nothing,
     note: noteFor(index),
