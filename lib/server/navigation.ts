@@ -7,7 +7,7 @@ export type NavigationEntry = { readonly label: string; readonly href: string }
 /** The places that a person's roles give them, in the order of their day. */
 export function navigationFor(actor: Actor): readonly NavigationEntry[] {
   const entries: NavigationEntry[] = []
-  if (actor.isConsultant || actor.memberships.length > 0) {
+  if (actor.isConsultant || actor.isAdministrator || actor.memberships.length > 0) {
     entries.push({ label: 'Engagements', href: '/engagements' })
   }
   const isInSeveral = actor.memberships.length > 1

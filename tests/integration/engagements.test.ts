@@ -80,8 +80,10 @@ describe('a brief', () => {
   ])('with %j gets its sentence at %s', async (change, field) => {
     const { companyId, engineer } = osterby
     const refused = await openEngagement.execute(portal.deps, engineer, { ...aBrief, companyId, ...change })
-    expect(refused).toMatchObject({ ok: false, error: { code: 'invalid_input' } })
-    expect(refused.ok ? {} : refused.error.fields).toHaveProperty([field])
+    expect(refused).toMatchObject({
+      ok: false,
+      error: { code: 'invalid_input', fields: { [field]: expect.any(String) } },
+    })
   })
 
   it.each(['status', 'number', 'openedBy', 'price'])(

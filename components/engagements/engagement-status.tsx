@@ -1,0 +1,14 @@
+import type { EngagementStatus as Status } from '@/db/tables/engagements'
+
+import { StatusMark, type StatusKind } from '../ui/status-mark'
+
+const marks: Record<Status, { readonly kind: StatusKind; readonly words: string }> = {
+  briefed: { kind: 'waiting', words: 'Waits for a scope' },
+  scoped: { kind: 'attention', words: 'Scope proposed' },
+  active: { kind: 'active', words: 'Active' },
+  closed: { kind: 'closed', words: 'Closed' },
+}
+
+export const EngagementStatus = ({ status }: { readonly status: Status }) => (
+  <StatusMark kind={marks[status].kind}>{marks[status].words}</StatusMark>
+)

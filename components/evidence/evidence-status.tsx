@@ -1,0 +1,13 @@
+import type { EvidenceStatus as Status } from '@/db/tables/evidence'
+
+import { StatusMark, type StatusKind } from '../ui/status-mark'
+
+const marks: Record<Status, { readonly kind: StatusKind; readonly words: string }> = {
+  checking: { kind: 'waiting', words: 'Being checked' },
+  ready: { kind: 'active', words: 'Ready' },
+  refused: { kind: 'over-limit', words: 'Not readable' },
+}
+
+export const EvidenceStatus = ({ status }: { readonly status: Status }) => (
+  <StatusMark kind={marks[status].kind}>{marks[status].words}</StatusMark>
+)
