@@ -1,0 +1,1 @@
+export { renderReport as default } from '@/pdf/render-report'
