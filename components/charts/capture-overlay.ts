@@ -19,6 +19,7 @@ type Flag = {
   readonly colour: string
   readonly dash: number[]
   readonly row: number
+  readonly side: 'left' | 'right'
 }
 
 /** Canvas pixels to one CSS pixel. */
@@ -51,7 +52,8 @@ const drawName = (plot: uPlot, flag: Flag, paper: string) => {
   const scale = pixelRatio(plot)
   const width = ctx.measureText(flag.label).width + 8 * scale
   const height = 17 * scale
-  const left = Math.min(at, bbox.left + bbox.width - width)
+  const hung = flag.side === 'left' ? at - width : at
+  const left = Math.min(Math.max(hung, bbox.left), bbox.left + bbox.width - width)
   const top = bbox.top + 2 * scale + flag.row * (height + 2 * scale)
   ctx.fillStyle = flag.colour
   ctx.fillRect(left, top, width, height)
@@ -59,11 +61,22 @@ const drawName = (plot: uPlot, flag: Flag, paper: string) => {
   ctx.fillText(flag.label, left + 4 * scale, top + height / 2)
 }
 
-const flagsOf = (view: OverlayView, look: OverlayLook): Flag[] => [
-  ...view.markers.map((marker) => ({ ...marker, colour: look.marker, dash: [2, 3], row: 1 })),
-  { x: view.cursors.from, label: 'A', colour: look.cursor, dash: [], row: 0 },
-  { x: view.cursors.to, label: 'B', colour: look.cursor, dash: [6, 3], row: 0 },
-]
+/** The flags of the two cursors hang outwards, so that neither covers the other when they stand close. */
+const flagsOf = ({ cursors, markers }: OverlayView, look: OverlayLook): Flag[] => {
+  const isInOrder = cursors.from <= cursors.to
+  const common = { colour: look.cursor, row: 0 }
+  return [
+    ...markers.map((marker) => ({
+      ...marker,
+      colour: look.marker,
+      dash: [2, 3],
+      row: 1,
+      side: 'right' as const,
+    })),
+    { ...common, x: cursors.from, label: 'A', dash: [], side: isInOrder ? 'left' : 'right' },
+    { ...common, x: cursors.to, label: 'B', dash: [6, 3], side: isInOrder ? 'right' : 'left' },
+  ]
+}
 
 /** Draws the markers of the page and the two cursors A and B, every name above every line. */
 export const drawOverlay = (plot: uPlot, view: OverlayView, look: OverlayLook): void => {

@@ -1,21 +1,9 @@
-/** SI prefixes (SI Brochure, 9th edition, table 7), the powers of 1000 that electronics uses. */
-const prefixes = new Map([
-  [-15, 'f'],
-  [-12, 'p'],
-  [-9, 'n'],
-  [-6, 'µ'],
-  [-3, 'm'],
-  [0, ''],
-  [3, 'k'],
-  [6, 'M'],
-  [9, 'G'],
-  [12, 'T'],
-])
+import { prefixSymbols } from '@/lib/core/units/si-prefix'
 
 /** Units that take a prefix; decibels, per cent, degrees and pure numbers never do. */
 const prefixable = /^(s|Hz|V|A|Ω|F|H|W|m|T|J|C|S|Wb)([/·].*)?$/
 
-const lowest = -15
+const lowest = -18
 const highest = 12
 
 export type EngineeringScale = { readonly exponent: number; readonly unit: string }
@@ -27,7 +15,7 @@ export const engineeringScale = (value: number, unit: string): EngineeringScale 
   // The small excess keeps 1e-9 and 1e6, which logarithms miss by a few parts in 1e16, on their own prefix.
   const thousands = Math.floor(Math.log10(size) / 3 + 1e-12)
   const exponent = Math.min(highest, Math.max(lowest, thousands * 3))
-  return { exponent, unit: `${prefixes.get(exponent) ?? ''}${unit}` }
+  return { exponent, unit: `${prefixSymbols[exponent] ?? ''}${unit}` }
 }
 
 /** A number with a true minus sign and no trailing zeros beyond `decimals`; never "−0". */

@@ -29,7 +29,7 @@ describe('engineering labels', () => {
   })
 
   it('stays inside the prefixes it knows at both ends', () => {
-    expect(engineeringScale(1e-20, 'F').unit).toBe('fF')
+    expect(engineeringScale(1e-20, 'F').unit).toBe('aF')
     expect(engineeringScale(1e16, 'Hz').unit).toBe('THz')
   })
 
