@@ -125,7 +125,7 @@ async function readPart(file: string, start: number, length: number): Promise<Ui
 
 function readStream(file: string): ReadableStream<Uint8Array> {
   let handle: FileHandle | undefined
-  return new ReadableStream<Uint8Array>({
+  const source: UnderlyingSource<Uint8Array> = {
     async pull(controller) {
       handle ??= await open(file, 'r')
       const { bytesRead, buffer } = await handle.read(new Uint8Array(chunkBytes), 0, chunkBytes)
@@ -136,5 +136,7 @@ function readStream(file: string): ReadableStream<Uint8Array> {
     async cancel() {
       await handle?.close()
     },
-  })
+  }
+  // Without a queue of its own nothing is opened before somebody reads.
+  return new ReadableStream(source, { highWaterMark: 0 })
 }

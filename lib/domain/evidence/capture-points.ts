@@ -1,5 +1,6 @@
 import 'server-only'
 
+import { decimateMinMax } from '@/lib/core/waveform/decimate-min-max'
 import type { FileStore } from '@/lib/ports/file-store'
 
 import { readSamples } from './channel-samples'
@@ -24,11 +25,11 @@ type TimeBase = {
   readonly intervalSeconds: number
 }
 
-const samplesPerRead = 32_768
+const samplesPerRead = 65_536
 
 /**
  * The samples from `from` to `to` (seconds; one more at each side, so that a line reaches the edge of the plot) in at
- * most `buckets` columns of equal width. Read in pieces, so that a long record never holds up the request loop.
+ * most `buckets` columns. Read in pieces of whole columns, so that a long record never holds up the request loop.
  */
 export async function readPoints(
   files: FileStore,
@@ -38,28 +39,22 @@ export async function readPoints(
   const first = indexAt(wanted.from, 0, base, -1)
   const last = indexAt(wanted.to, base.samples - 1, base, 1)
   const count = Math.max(1, last - first + 1)
-  const buckets = Math.min(wanted.buckets, count)
-  const min = new Array<number>(buckets).fill(Infinity)
-  const max = new Array<number>(buckets).fill(-Infinity)
-  for (let done = 0; done < count; done += samplesPerRead) {
-    const length = Math.min(samplesPerRead, count - done)
-    const samples = await readSamples(files, wanted.evidenceId, wanted.channel, first + done, length)
-    samples.forEach((value, index) => {
-      const bucket = Math.floor(((done + index) * buckets) / count)
-      if (value < (min[bucket] ?? 0)) min[bucket] = value
-      if (value > (max[bucket] ?? 0)) max[bucket] = value
-    })
+  const columns = Math.min(wanted.buckets, count)
+  const pieces = Math.min(columns, Math.ceil(count / samplesPerRead))
+  const startOf = (column: number) => first + Math.ceil((column * count) / columns)
+  const points: Record<keyof CapturePointsDto, number[]> = { x: [], min: [], max: [] }
+  for (let piece = 0; piece < pieces; piece += 1) {
+    const from = Math.floor((piece * columns) / pieces)
+    const to = Math.floor(((piece + 1) * columns) / pieces)
+    const begin = startOf(from)
+    const samples = await readSamples(files, wanted.evidenceId, wanted.channel, begin, startOf(to) - begin)
+    const start = base.startSeconds + begin * base.intervalSeconds
+    const trace = decimateMinMax(samples, start, base.intervalSeconds, -Infinity, Infinity, to - from)
+    points.x.push(...trace.x)
+    points.min.push(...trace.min)
+    points.max.push(...trace.max)
   }
-  const instant = (sample: number) => base.startSeconds + sample * base.intervalSeconds
-  const x = min.map((_, bucket) => instant(first + middleOf(bucket, buckets, count)))
-  return { x, min, max }
-}
-
-/** The middle of the samples that fall into a column; the sample itself where there is one for each. */
-function middleOf(bucket: number, buckets: number, count: number): number {
-  const start = Math.ceil((bucket * count) / buckets)
-  const end = Math.ceil(((bucket + 1) * count) / buckets) - 1
-  return (start + end) / 2
+  return points
 }
 
 function indexAt(instant: number | undefined, otherwise: number, base: TimeBase, margin: -1 | 1): number {

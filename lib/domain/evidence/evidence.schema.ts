@@ -60,5 +60,5 @@ export const capturePointsSchema = z.strictObject({
   channel: z.coerce.number().int().min(0).max(63).default(0),
   from: z.coerce.number().optional(),
   to: z.coerce.number().optional(),
-  buckets: z.coerce.number().int().min(2).max(4000).default(1000),
+  buckets: z.coerce.number().int().min(100).max(4000).default(1000),
 })

@@ -1,0 +1,60 @@
+import { open, readFile, rename } from 'node:fs/promises'
+
+import { err, ok, type Result } from '@/lib/core/result'
+import type { Capture } from '@/lib/core/waveform/capture'
+import { parseCapture } from '@/lib/core/waveform/parse-capture'
+import type { CaptureChannelSummary, CaptureRefusal, CaptureSummary } from '@/lib/ports/capture-analyser'
+
+import type { CaptureJob } from './capture-job'
+
+/** Parses the text and writes each channel's samples to its file; runs in the worker thread. */
+export async function analyseCaptureFile(job: CaptureJob): Promise<Result<CaptureSummary, CaptureRefusal>> {
+  const parsed = parseCapture(await readFile(job.source))
+  if (!parsed.ok) return err({ code: 'not_readable', message: parsed.error.message })
+  const capture = parsed.value
+  if (capture.channels.length > job.channelFiles.length) {
+    return err(tooManyChannels(capture.channels.length, job.channelFiles.length))
+  }
+  for (const [position, channel] of capture.channels.entries()) {
+    const file = job.channelFiles[position]
+    if (file !== undefined) await writeWhole(file, channel.values)
+  }
+  return ok(summaryOf(capture))
+}
+
+const summaryOf = (capture: Capture): CaptureSummary => ({
+  samples: capture.samples,
+  startSeconds: capture.startSeconds,
+  intervalSeconds: capture.intervalSeconds,
+  intervalSource: capture.intervalSource,
+  warnings: capture.warnings,
+  channels: capture.channels.map(({ name, unit, values }) => ({ name, unit, ...rangeOf(values) })),
+})
+
+function rangeOf(values: Float64Array): Pick<CaptureChannelSummary, 'minimum' | 'maximum'> {
+  let minimum = Infinity
+  let maximum = -Infinity
+  for (const value of values) {
+    if (value < minimum) minimum = value
+    if (value > maximum) maximum = value
+  }
+  return { minimum, maximum }
+}
+
+/** Beside first, synchronised, then renamed: samples under their final name are always whole. */
+async function writeWhole(file: string, values: Float64Array): Promise<void> {
+  const unfinished = `${file}.part`
+  const handle = await open(unfinished, 'w')
+  try {
+    await handle.writeFile(new Uint8Array(values.buffer, values.byteOffset, values.byteLength))
+    await handle.sync()
+  } finally {
+    await handle.close()
+  }
+  await rename(unfinished, file)
+}
+
+const tooManyChannels = (found: number, most: number): CaptureRefusal => ({
+  code: 'not_readable',
+  message: `The file has ${found} channels; at most ${most} are read. Export those that matter, then send it again.`,
+})
