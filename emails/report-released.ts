@@ -1,0 +1,29 @@
+import type { Mail } from '@/lib/domain/mail'
+
+import { facts, link, note, paragraph, type MailContent } from './mail-content'
+
+type ReportReleased = Extract<Mail, { kind: 'report_released' }>
+
+export function reportReleasedMail(report: ReportReleased): MailContent {
+  const name = `Report ${report.reportNumber}, revision ${report.revision}`
+  return {
+    subject: `${name}: ${report.engagementTitle}`,
+    heading: `${name} is released`,
+    blocks: [
+      paragraph('It was reviewed and signed by its author and by a reviewer who did not write it.'),
+      facts(
+        { label: 'Engagement', value: report.engagementTitle },
+        { label: 'Report', value: report.reportNumber },
+        { label: 'Revision', value: String(report.revision) },
+        { label: 'Check code', value: report.checkCode },
+      ),
+      link('Open the report', report.link),
+      paragraph('Anybody who holds the file can check its signatures, and whether it is still current.'),
+      link('Check a copy', report.checkLink),
+      note(
+        'Its results are engineering estimates, not a statement of conformity: that is for an accredited laboratory under the standard and edition in force.',
+      ),
+    ],
+    reason: 'You receive this because you take part in this engagement.',
+  }
+}
