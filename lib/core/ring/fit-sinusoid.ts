@@ -65,7 +65,7 @@ export function sinusoidAt(model: DecayingSinusoid, time: number): number {
   return model.level + Math.exp(-model.decay * time) * swing
 }
 
-/** JᵀJ and Jᵀr; decay and frequency are taken relative to `omega`-sized steps by the caller through the time scale. */
+/** JᵀJ and Jᵀr of the five parameters, with the sums of squares of the residuals and of the deviations from the level. */
 function normalEquations(
   values: Float64Array,
   from: number,
