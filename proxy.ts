@@ -33,4 +33,4 @@ function contentSecurityPolicy(nonce: string, isDevelopment: boolean): string {
   ].join('; ')
 }
 
-export const config = { matcher: ['/((?!_next/static|fonts/|api/evidence/upload).*)'] }
+export const config = { matcher: ['/((?!_next/static|fonts/|api/evidence/upload|api/check).*)'] }

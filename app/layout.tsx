@@ -1,5 +1,5 @@
 import type { Metadata, Viewport } from 'next'
-import { cookies } from 'next/headers'
+import { cookies, headers } from 'next/headers'
 import type { ReactNode } from 'react'
 
 import { themeCookie } from '@/components/shell/theme-cookie'
@@ -19,11 +19,16 @@ export const viewport: Viewport = { width: 'device-width', initialScale: 1, colo
 export const dynamic = 'force-dynamic'
 
 export default async function RootLayout({ children }: { readonly children: ReactNode }) {
-  const jar = await cookies()
+  const [jar, head] = await Promise.all([cookies(), headers()])
+  const nonce = head.get('x-nonce') ?? undefined
   const theme = jar.get(themeCookie)?.value
   const chosen = theme === 'light' || theme === 'dark' ? theme : undefined
   return (
     <html lang="en" className={fontVariables} data-theme={chosen}>
+      <head>
+        {/* react-aria adds one style element of its own and reads the nonce for it here. */}
+        <meta property="csp-nonce" nonce={nonce} />
+      </head>
       <body>{children}</body>
     </html>
   )

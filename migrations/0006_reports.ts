@@ -42,6 +42,7 @@ export const reports: Migration = {
       document text check (document is null or json_valid(document)),
       file_id text,
       file_sha256 text,
+      signature_areas text check (signature_areas is null or json_valid(signature_areas)),
       created_at integer not null,
       submitted_at integer,
       approved_at integer,

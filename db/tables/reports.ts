@@ -38,6 +38,7 @@ export type ReportTable = {
   document: string | null
   file_id: string | null
   file_sha256: string | null
+  signature_areas: string | null
   created_at: number
   submitted_at: number | null
   approved_at: number | null

@@ -18,7 +18,7 @@ export const policy = {
   'person.inviteStaff': ['administrator'],
   'person.disable': ['administrator'],
   'person.endSessions': ['self'],
-  'certificate.create': ['self'],
+  'certificate.create': ['consultant'],
 
   'engagement.open': ['purchaser', 'engineer'],
   'engagement.read': engagementPeople,

@@ -4,6 +4,7 @@ import type { Clock } from '@/lib/ports/clock'
 import type { FileStore } from '@/lib/ports/file-store'
 import type { Ids } from '@/lib/ports/ids'
 import type { PasswordHasher } from '@/lib/ports/password-hasher'
+import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
 
 /** Where a request came from, as far as it is known. */
 export type RequestInfo = {
@@ -15,8 +16,11 @@ export type RequestInfo = {
 
 export type PracticeSettings = {
   readonly practiceName: string
+  readonly practiceAddress: string
   readonly publicUrl: string
   readonly uploadLimitBytes: number
+  /** Opens the practice's certificate authority. */
+  readonly authorityPassphrase: string
 }
 
 /** Everything a service needs from outside, handed in so that tests can hand in other pieces. */
@@ -27,6 +31,7 @@ export type Deps = {
   readonly files: FileStore
   readonly captures: CaptureAnalyser
   readonly passwords: PasswordHasher
+  readonly pdf: PdfRenderer
   readonly settings: PracticeSettings
   readonly request: RequestInfo
 }

@@ -23,4 +23,6 @@ export type RenderedReport = {
 /** Turns a frozen document into a PDF, off the request loop. */
 export type PdfRenderer = {
   readonly render: (document: ReportDocument) => Promise<Result<RenderedReport, RenderError>>
+  /** A complete TrueType font for the text of a visible signature. */
+  readonly signatureFont: () => Promise<Uint8Array>
 }

@@ -3,7 +3,7 @@ import 'server-only'
 type Attachment = {
   readonly name: string
   readonly mediaType: string
-  readonly sizeBytes: number
+  readonly sizeBytes?: number
   readonly body: ReadableStream<Uint8Array>
 }
 
@@ -15,7 +15,7 @@ export function attachment({ name, mediaType, sizeBytes, body }: Attachment): Re
   return new Response(body, {
     headers: {
       'content-type': mediaType,
-      'content-length': String(sizeBytes),
+      ...(sizeBytes === undefined ? {} : { 'content-length': String(sizeBytes) }),
       'content-disposition': dispositionOf(name),
       'x-content-type-options': 'nosniff',
       'content-security-policy': "sandbox; default-src 'none'",

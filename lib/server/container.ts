@@ -7,6 +7,7 @@ import { openDatabase } from '@/db/client'
 import { createArgon2Hasher } from '@/lib/adapters/argon2/argon2-hasher'
 import { createCaptureWorker } from '@/lib/adapters/capture-worker/capture-worker'
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
+import { createPdfWorker } from '@/lib/adapters/pdf-worker/pdf-worker'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import { systemClock } from '@/lib/adapters/system-clock/system-clock'
 import type { Deps } from '@/lib/domain/deps'
@@ -35,10 +36,13 @@ function createContainer(): Container {
       files,
       captures: createCaptureWorker(files),
       passwords: createArgon2Hasher(),
+      pdf: createPdfWorker(),
       settings: {
         practiceName: env.practice.name,
+        practiceAddress: env.practice.address,
         publicUrl: env.publicUrl,
         uploadLimitBytes: env.uploadLimitBytes,
+        authorityPassphrase: env.authorityPassphrase,
       },
     },
   }

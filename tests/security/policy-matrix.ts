@@ -35,7 +35,7 @@ export const policyMatrix: Readonly<Record<Action, Row>> = {
   'person.inviteStaff': { about: 'practice', may: ['administrator'] },
   'person.disable': { about: 'oneself', may: ['administrator'] },
   'person.endSessions': { about: 'oneself', may: everybody },
-  'certificate.create': { about: 'oneself', may: everybody },
+  'certificate.create': { about: 'practice', may: ['consultant on it', 'consultant not on it'] },
   'engagement.open': { about: 'company', may: members },
   'engagement.read': { about: 'engagement', may: people },
   'engagement.readHeading': { about: 'engagement', may: [...people, 'administrator'] },

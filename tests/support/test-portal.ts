@@ -9,6 +9,7 @@ import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import type { Deps } from '@/lib/domain/deps'
 
 import { createInlineCaptureAnalyser } from './inline-capture-analyser'
+import { createInlinePdfRenderer } from './inline-pdf-renderer'
 import { createQuickHasher } from './quick-hasher'
 
 /** A clock that stands still until a test moves it. */
@@ -44,9 +45,12 @@ export async function openTestPortal(): Promise<TestPortal> {
     files,
     captures: createInlineCaptureAnalyser(files),
     passwords: createQuickHasher(),
+    pdf: createInlinePdfRenderer(),
     settings: {
       practiceName: 'Tarn Hollow EMC',
       publicUrl: 'http://localhost:3000',
+      practiceAddress: '1 Weir Lane, Tarn Hollow',
+      authorityPassphrase: 'authority of the test',
       uploadLimitBytes: 64 * 1024 * 1024,
     },
     request: { id: 'test-request', address: '192.0.2.1', browserSecret: 'browser-of-the-test' },

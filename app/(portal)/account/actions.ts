@@ -1,6 +1,8 @@
 'use server'
 
 import { action } from '@/lib/server/action'
-import { sessions } from '@/lib/server/operations'
+import { certificates, sessions } from '@/lib/server/operations'
 
 export const signOutEverywhere = action(sessions.signOutEverywhere, { goTo: () => '/sign-in' })
+
+export const createCertificate = action(certificates.createCertificate)

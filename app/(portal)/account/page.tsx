@@ -1,13 +1,16 @@
 import type { Metadata } from 'next'
 
 import { ActionForm } from '@/components/forms/action-form'
+import { CertificateSheet } from '@/components/reports/certificate-sheet'
 import { PageBody } from '@/components/shell/page-body'
 import { PageHeader } from '@/components/shell/page-header'
 import { DescriptionList } from '@/components/ui/description-list'
 import { Sheet } from '@/components/ui/sheet'
+import { certificates } from '@/lib/server/operations'
+import { query } from '@/lib/server/query'
 import { requireActor } from '@/lib/server/session'
 
-import { signOutEverywhere } from './actions'
+import { createCertificate, signOutEverywhere } from './actions'
 
 export const metadata: Metadata = { title: 'Your account' }
 
@@ -35,6 +38,12 @@ export default async function AccountPage() {
             ]}
           />
         </Sheet>
+        {actor.isConsultant ? (
+          <CertificateSheet
+            certificate={await query(certificates.myCertificate)}
+            create={createCertificate}
+          />
+        ) : null}
         <Sheet title="Sessions">
           <p className="mb-4 max-w-measure">
             A session ends after two hours without use and after twelve hours in any case. If a device was

@@ -1,3 +1,4 @@
+import { readFile } from 'node:fs/promises'
 import path from 'node:path'
 
 import { Piscina } from 'piscina'
@@ -8,6 +9,8 @@ import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
 
 const timeLimitMilliseconds = 60_000
 const heapLimitMebibytes = 768
+
+const fontFile = path.join(/* turbopackIgnore: true */ process.cwd(), 'pdf', 'fonts', 'SourceSans3-Regular.ttf')
 
 const area = z.object({
   page: z.int().nonnegative(),
@@ -41,6 +44,7 @@ export function createPdfWorker(
         return err({ code: isTimeout ? 'render_timed_out' : 'render_failed' })
       }
     },
+    signatureFont: () => readFile(fontFile),
     close: () => pool.destroy(),
   }
 }
