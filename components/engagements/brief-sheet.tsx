@@ -1,4 +1,4 @@
-import { quantityText } from '@/lib/core/units/format-quantity'
+import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
 import type { Unit } from '@/lib/core/units/unit'
 import type { BriefDto } from '@/lib/domain/engagements/engagement-dto'
 
@@ -14,7 +14,7 @@ const Prose = ({ text }: { readonly text: string }) =>
 
 const value = (known: number | null, unit: Unit) => {
   if (known === null) return unknown
-  const [number = '', written = ''] = quantityText(known, unit, 4).split('\u00a0')
+  const [number = '', written = ''] = exactQuantityText(known, unit).split('\u00a0')
   return <Quantity value={number} unit={written} />
 }
 

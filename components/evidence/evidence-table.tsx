@@ -59,7 +59,7 @@ export const EvidenceTable = ({ files, brief = false }: EvidenceTableProps) => (
 const FileName = ({ file }: { readonly file: EvidenceDto }) => (
   <TextLink
     href={`/engagements/${file.engagementId}/evidence/${file.evidenceId}`}
-    className="[overflow-wrap:anywhere]"
+    className="inline-block min-w-36 [overflow-wrap:anywhere]"
   >
     {file.name}
   </TextLink>

@@ -1,9 +1,10 @@
 import type { FormAction } from '@/lib/core/action-state'
+import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
+import type { Unit } from '@/lib/core/units/unit'
 import type { CaptureFacts } from '@/lib/domain/evidence/capture-facts'
 
 import { ActionForm } from '../forms/action-form'
 import { FormArea, FormQuantity, FormSelect, FormText } from '../forms/form-fields'
-import { entryText } from './entry-text'
 
 const groundMethods: readonly {
   readonly value: NonNullable<CaptureFacts['groundMethod']>
@@ -14,6 +15,9 @@ const groundMethods: readonly {
   { value: 'coaxial', label: 'Coaxial cable soldered or on a connector' },
   { value: 'differential', label: 'Differential probe' },
 ]
+
+const entryText = (value: number | null, unit: Unit): string =>
+  value === null ? '' : exactQuantityText(value, unit)
 
 type FactsFormProps = {
   readonly evidenceId: string

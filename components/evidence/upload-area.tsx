@@ -8,6 +8,7 @@ import { classNames } from '../ui/class-names'
 import { Sheet } from '../ui/sheet'
 import { UploadRow } from './upload-row'
 import { isUnderWay } from './upload-state'
+import { useDropBeside } from './use-drop-beside'
 import { useUploads } from './use-uploads'
 
 type UploadAreaProps = {
@@ -19,25 +20,28 @@ type UploadAreaProps = {
 
 export const UploadArea = ({ engagementId, limitInWords, children }: UploadAreaProps) => {
   const { uploads, add, retry, dismiss } = useUploads(engagementId)
-  const { getRootProps, getInputProps, isDragActive, open } = useDropzone({
+  const { getRootProps, getInputProps, isDragActive, isDragGlobal, open, rootRef } = useDropzone({
     onDrop: (files) => add(files),
     noClick: true,
     noKeyboard: true,
   })
+  useDropBeside(rootRef, add)
   const left = uploads.filter(isUnderWay).length
   return (
     <div {...getRootProps({ role: undefined, tabIndex: undefined })} className="flex flex-col gap-6">
       <div
         className={classNames(
           'rounded border-2 border-dashed bg-sheet px-4 py-5 sm:px-6',
-          isDragActive ? 'border-copper bg-copper-wash' : 'border-rule-strong',
+          isDragActive || isDragGlobal ? 'border-copper bg-copper-wash' : 'border-rule-strong',
         )}
       >
         <input {...getInputProps({ style: undefined, className: 'sr-only', 'aria-label': 'Files to add' })} />
         <div className="flex flex-wrap items-center justify-between gap-x-8 gap-y-3">
           <div className="min-w-0 max-w-measure">
             <p className="font-serif text-lg font-semibold">
-              {isDragActive ? 'Let go to add the files' : 'Drag files anywhere onto this page'}
+              {isDragActive || isDragGlobal
+                ? 'Let go to add the files'
+                : 'Drag files anywhere onto this page'}
             </p>
             <p className="text-sm text-ink-soft">
               Captures as delimited text (.csv .tsv .txt .dat), .pdf, .svg, pictures, Touchstone, .zip; up to{' '}

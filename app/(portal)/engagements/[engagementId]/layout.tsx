@@ -10,7 +10,7 @@ export async function generateMetadata({
   params,
 }: Pick<LayoutProps<'/engagements/[engagementId]'>, 'params'>): Promise<Metadata> {
   const { title } = await query(engagements.getHeading, await params)
-  return { title: { default: title, template: `%s · ${title}` } }
+  return { title: { default: title, template: `%s · ${title} · Quellbench` } }
 }
 
 export default async function EngagementLayout({
