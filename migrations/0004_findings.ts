@@ -9,14 +9,16 @@ export const findings: Migration = {
     sql`create table method_run (
       id text primary key check (length(id) = 26),
       engagement_id text not null references engagement (id),
+      number integer not null check (number > 0),
       method_id text not null,
       method_version integer not null check (method_version > 0),
       inputs text not null check (json_valid(inputs)),
       result text not null check (json_valid(result)),
+      figures text not null check (json_valid(figures)),
       created_by text not null references person (id),
-      created_at integer not null
+      created_at integer not null,
+      unique (engagement_id, number)
     ) strict`,
-    sql`create index method_run_by_engagement on method_run (engagement_id)`,
     sql`create table method_run_evidence (
       run_id text not null references method_run (id),
       evidence_id text not null references evidence (id),
@@ -27,6 +29,10 @@ export const findings: Migration = {
       begin select raise(abort, 'a run is never edited'); end`,
     sql`create trigger method_run_is_not_dropped before delete on method_run
       begin select raise(abort, 'a run is never deleted'); end`,
+    sql`create trigger method_run_evidence_is_kept before update on method_run_evidence
+      begin select raise(abort, 'the evidence of a run is never edited'); end`,
+    sql`create trigger method_run_evidence_is_not_dropped before delete on method_run_evidence
+      begin select raise(abort, 'the evidence of a run is never deleted'); end`,
     sql`create table finding (
       id text primary key check (length(id) = 26),
       engagement_id text not null references engagement (id),
@@ -44,12 +50,17 @@ export const findings: Migration = {
       unique (engagement_id, number),
       check ((status = 'published') = (published_at is not null))
     ) strict`,
+    sql`create trigger finding_is_kept_once_published before update on finding when old.status = 'published'
+      begin select raise(abort, 'a published finding is never edited'); end`,
     sql`create table finding_run (
       finding_id text not null references finding (id),
       run_id text not null references method_run (id),
       position integer not null,
       primary key (finding_id, run_id)
     ) strict`,
+    sql`create trigger finding_run_is_kept_once_published before delete on finding_run
+      when (select status from finding where id = old.finding_id) = 'published'
+      begin select raise(abort, 'a published finding is never edited'); end`,
     sql`create table finding_action (
       id text primary key check (length(id) = 26),
       finding_id text not null references finding (id),
@@ -58,5 +69,8 @@ export const findings: Migration = {
       part_values text not null,
       side_effects text not null
     ) strict`,
+    sql`create trigger finding_action_is_kept_once_published before delete on finding_action
+      when (select status from finding where id = old.finding_id) = 'published'
+      begin select raise(abort, 'a published finding is never edited'); end`,
   ],
 }

@@ -1,10 +1,14 @@
 export type MethodRunTable = {
   id: string
   engagement_id: string
+  /** Counted from 1 within the engagement. */
+  number: number
   method_id: string
   method_version: number
   inputs: string
   result: string
+  /** Apart from the result, so that a list of runs need not read them. */
+  figures: string
   created_by: string
   created_at: number
 }
