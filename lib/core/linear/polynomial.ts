@@ -11,6 +11,3 @@ export function valueAt(polynomial: Polynomial, point: Complex): Complex {
   }
   return value
 }
-
-export const derivativeOf = (polynomial: Polynomial): Polynomial =>
-  polynomial.slice(1).map((coefficient, index) => coefficient * (index + 1))

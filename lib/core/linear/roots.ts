@@ -35,7 +35,7 @@ function realRootOfCubic(a0: number, a1: number, a2: number): number {
     else low = middle
   }
   let root = (low + high) / 2
-  for (let step = 0; step < 3; step += 1) {
+  for (let step = 0; step < 50; step += 1) {
     const slope = (3 * root + 2 * a2) * root + a1
     if (slope === 0) break
     const next = root - at(root) / slope

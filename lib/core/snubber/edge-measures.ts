@@ -2,51 +2,94 @@ import { minimiseOn } from '../linear/minimise'
 import { magnitude, type Complex } from '../linear/complex'
 import { valueOf, type EdgeResponse } from './edge-response'
 
-const samples = 600
+/** Enough to find the highest swing of a window; the golden section then finds its crest. */
+const samples = 100
+
+/** After so many time constants a mode is gone. */
+const settled = 40
+
+type Window = readonly [from: number, to: number]
+
+type Extreme = { readonly time: number; readonly value: number }
 
 /** The largest value of a response and when it is reached, in normalised time. */
-export function peakOf(response: EdgeResponse, poles: readonly Complex[]): { time: number; value: number } {
-  const slowest = Math.min(...poles.map((pole) => magnitude(pole)))
-  // The first maximum after the edge is the highest: every mode decays from there.
-  const horizon = response.edge + (2.2 * Math.PI) / slowest
-  return maximumOn(response, horizon, 1)
-}
+export const peakOf = (response: EdgeResponse, poles: readonly Complex[]): Extreme =>
+  maximumIn(windowsOf(response, poles), (time) => valueOf(response, time))
 
 /** The largest magnitude, for a current that swings both ways. */
 export function peakMagnitudeOf(response: EdgeResponse, poles: readonly Complex[]): number {
-  const slowest = Math.min(...poles.map((pole) => magnitude(pole)))
-  const horizon = response.edge + (2.2 * Math.PI) / slowest
-  return Math.max(maximumOn(response, horizon, 1).value, maximumOn(response, horizon, -1).value)
+  const windows = windowsOf(response, poles)
+  const upwards = maximumIn(windows, (time) => valueOf(response, time))
+  const downwards = maximumIn(windows, (time) => -valueOf(response, time))
+  return Math.max(upwards.value, downwards.value)
 }
 
-function maximumOn(response: EdgeResponse, horizon: number, sign: 1 | -1): { time: number; value: number } {
-  const at = (time: number) => sign * valueOf(response, time)
-  const step = horizon / samples
-  let best = 0
-  for (let index = 0; index <= samples; index += 1) {
-    if (at(index * step) > at(best * step)) best = index
+/**
+ * Where the extremes are: within the first cycle of each mode after each corner of the source, since every mode decays
+ * from there, and within the last cycle before the end of the edge, where the slope adds to the ring.
+ */
+function windowsOf({ edge }: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
+  const cycles = new Set(poles.map(cycleOf))
+  return [...cycles].flatMap((cycle): Window[] =>
+    edge === 0
+      ? [[0, cycle]]
+      : [
+          [0, Math.min(cycle, edge)],
+          [Math.max(0, edge - cycle), edge],
+          [edge, edge + cycle],
+        ],
+  )
+}
+
+/** A little more than the cycle of an oscillation; seven time constants of what does not oscillate. */
+function cycleOf(pole: Complex): number {
+  const size = magnitude(pole)
+  const slowest = (20 * Math.PI) / size
+  return pole.im === 0 ? (2.2 * Math.PI) / size : Math.min((2.2 * Math.PI) / Math.abs(pole.im), slowest)
+}
+
+function maximumIn(windows: readonly Window[], at: (time: number) => number): Extreme {
+  let best = { time: 0, value: at(0), step: 0 }
+  for (const [from, to] of windows) {
+    const step = (to - from) / samples
+    for (let index = 0; index <= samples; index += 1) {
+      const time = from + index * step
+      const value = at(time)
+      if (value > best.value) best = { time, value, step }
+    }
   }
-  const low = Math.max(0, (best - 1) * step)
-  const time = minimiseOn((t) => -at(t), low, (best + 1) * step, 1e-10)
-  return at(time) > at(best * step)
-    ? { time, value: at(time) }
-    : { time: best * step, value: at(best * step) }
+  const crest = minimiseOn(
+    (time) => -at(time),
+    Math.max(0, best.time - best.step),
+    best.time + best.step,
+    1e-8,
+  )
+  return at(crest) > best.value ? { time: crest, value: at(crest) } : best
 }
 
 /** The time from the first crossing of 10 % to the first crossing of 90 % of the final value, normalised. */
 export function riseTimeOf(response: EdgeResponse, poles: readonly Complex[]): number {
-  return firstCrossing(response, poles, 0.9) - firstCrossing(response, poles, 0.1)
+  const times = rasterOf(response, poles)
+  return firstCrossing(response, times, 0.9) - firstCrossing(response, times, 0.1)
 }
 
-function firstCrossing(response: EdgeResponse, poles: readonly Complex[], level: number): number {
-  const fastest = Math.max(...poles.map((pole) => magnitude(pole)))
-  const slowest = Math.min(...poles.map((pole) => magnitude(pole)))
-  const step = Math.max(response.edge, 1 / slowest) / Math.max(200, (40 * fastest) / slowest)
-  const limit = response.edge + 60 / slowest
-  let time = 0
-  while (valueOf(response, time) < level && time < limit) time += step
-  let low = Math.max(0, time - step)
-  let high = time
+function rasterOf(response: EdgeResponse, poles: readonly Complex[]): readonly number[] {
+  const slowest = Math.min(...poles.map((pole) => -pole.re))
+  const windows: readonly Window[] = [
+    ...windowsOf(response, poles),
+    [0, response.edge],
+    [response.edge, response.edge + (slowest > 0 ? settled / slowest : 0)],
+  ]
+  const times = windows.flatMap(([from, to]) =>
+    Array.from({ length: samples + 1 }, (_, index) => from + (index * (to - from)) / samples),
+  )
+  return times.sort((a, b) => a - b)
+}
+
+function firstCrossing(response: EdgeResponse, times: readonly number[], level: number): number {
+  const index = times.findIndex((time) => valueOf(response, time) >= level)
+  let low = times[index - 1] ?? 0
+  let high = times[index] ?? times.at(-1) ?? 0
   for (let halving = 0; halving < 60; halving += 1) {
     const middle = (low + high) / 2
     if (valueOf(response, middle) < level) low = middle

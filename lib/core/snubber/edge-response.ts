@@ -1,14 +1,7 @@
-import {
-  complex,
-  divide,
-  exponential,
-  exponentialMean,
-  multiply,
-  scale,
-  type Complex,
-} from '../linear/complex'
-import { derivativeOf, valueAt, type Polynomial } from '../linear/polynomial'
+import { add, complex, divide, exponentialMean, multiply, scale, type Complex } from '../linear/complex'
+import { valueAt, type Polynomial } from '../linear/polynomial'
 import { rootsOf } from '../linear/roots'
+import { separate } from '../linear/separate'
 
 /** One exponential of a response, c·exp(p t). */
 export type Mode = { readonly pole: Complex; readonly weight: Complex }
@@ -25,15 +18,16 @@ export type EdgeResponse = {
 
 /**
  * Partial fractions of N(s)/(s D(s)) give the step response a0 + Σ R exp(p t) with R = N(p)/(p D′(p)); its running mean
- * over the edge is the ramp response. An edge of 0 is the ideal step. Exact to rounding as long as no two poles agree
- * to better than about 1e-6.
+ * over the edge is the ramp response. An edge of 0 is the ideal step. Exact to rounding, but for coinciding poles, which
+ * `separate` moves apart.
  */
 export function edgeResponse(numerator: Polynomial, denominator: Polynomial, edge: number): EdgeResponse {
-  const slopeOfD = derivativeOf(denominator)
   const final = (numerator[0] ?? 0) / (denominator[0] ?? 1)
-  const step = rootsOf(denominator).map((pole) => ({
+  const poles = separate(rootsOf(denominator))
+  const leading = denominator.at(-1) ?? 1
+  const step = poles.map((pole) => ({
     pole,
-    weight: divide(valueAt(numerator, pole), multiply(pole, valueAt(slopeOfD, pole))),
+    weight: divide(valueAt(numerator, pole), multiply(pole, slopeAt(pole, poles, leading))),
   }))
   const after = step.map(({ pole, weight }) => ({
     pole,
@@ -45,6 +39,13 @@ export function edgeResponse(numerator: Polynomial, denominator: Polynomial, edg
   return { edge, onEdge: { offset, slope: final / edge, modes: onEdge }, after: { final, modes: after } }
 }
 
+/** D′ at a pole: the leading coefficient times the distances to the other poles. */
+function slopeAt(pole: Complex, poles: readonly Complex[], leading: number): Complex {
+  return poles
+    .filter((other) => other !== pole)
+    .reduce((product, other) => multiply(product, add(pole, scale(other, -1))), complex(leading))
+}
+
 /** The response at a normalised time; 0 before the edge begins. */
 export function valueOf(response: EdgeResponse, time: number): number {
   if (time < 0) return 0
@@ -53,9 +54,15 @@ export function valueOf(response: EdgeResponse, time: number): number {
   return after.final + sumOf(after.modes, time - edge)
 }
 
+/** Of a conjugate pair one mode is taken twice. */
 function sumOf(modes: readonly Mode[], time: number): number {
   let sum = 0
-  for (const { pole, weight } of modes) sum += multiply(weight, exponential(scale(pole, time))).re
+  for (const { pole, weight } of modes) {
+    if (pole.im < 0) continue
+    const size = Math.exp(pole.re * time)
+    if (pole.im === 0) sum += weight.re * size
+    else sum += 2 * size * (weight.re * Math.cos(pole.im * time) - weight.im * Math.sin(pole.im * time))
+  }
   return sum
 }
 

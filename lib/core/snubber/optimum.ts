@@ -6,8 +6,11 @@ import { angularFrequency, characteristicImpedance, normalise, type SwitchNode }
 
 type BareNode = Omit<SwitchNode, 'snubber'>
 
-/** Between these multiples of Z0 both optima lie for every k from 0.05 to 200. */
-const searchRange = { low: 0.05, high: 40 }
+/** Both optima lie within this factor of the closed form for no series resistance. */
+const searchFactor = 10
+
+/** Points of the first, coarse search. */
+const coarse = 80
 
 export const withSnubber = (node: BareNode, resistance: number, capacitance: number): SwitchNode => ({
   inductance: node.inductance,
@@ -20,7 +23,7 @@ export const withSnubber = (node: BareNode, resistance: number, capacitance: num
 export function overshootOf(node: SwitchNode, edgeDuration: number): number {
   const { nodeVoltage, denominator } = normalise(node)
   const response = edgeResponse(nodeVoltage, denominator, edgeDuration * angularFrequency(node))
-  return peakOf(response, polesOf(node)).value - 1
+  return Math.max(0, peakOf(response, polesOf(node)).value - 1)
 }
 
 /**
@@ -31,8 +34,11 @@ export function leastOvershootResistance(node: BareNode, capacitance: number, ed
   const z0 = characteristicImpedance(node)
   const overshootAt = (logRho: number) =>
     overshootOf(withSnubber(node, Math.exp(logRho) * z0, capacitance), edgeDuration)
-  return Math.exp(bestOf(overshootAt)) * z0
+  return Math.exp(bestOf(overshootAt, capacitance / node.capacitance)) * z0
 }
+
+/** Rs/Z0 of most damping without series resistance; above k = 8 as for 8, near which the optimum stays. */
+const closedFormRho = (k: number): number => (1 + Math.min(k, 8)) ** 0.75 / Math.min(k, 8)
 
 /**
  * The Rs with the largest least damping ratio for a given Cs. Without series resistance it is in closed form
@@ -45,21 +51,23 @@ export function leastOvershootResistance(node: BareNode, capacitance: number, ed
 export function mostDampingResistance(node: BareNode, capacitance: number): number {
   const z0 = characteristicImpedance(node)
   const k = capacitance / node.capacitance
-  if (node.seriesResistance === 0 && k <= 8) return (z0 * (1 + k) ** 0.75) / k
+  if (node.seriesResistance === 0 && k <= 8) return z0 * closedFormRho(k)
   const dampingAt = (logRho: number) => leastDamping(withSnubber(node, Math.exp(logRho) * z0, capacitance))
-  const best = bestOf((logRho) => -dampingAt(logRho))
+  const best = bestOf((logRho) => -dampingAt(logRho), k)
   if (dampingAt(best) < 1 - 1e-9) return Math.exp(best) * z0
   return Math.exp(middleOfRealInterval((logRho) => dampingAt(logRho) >= 1 - 1e-9, best)) * z0
 }
 
 /** Coarse scan, then golden section around the best point. */
-function bestOf(objective: (logRho: number) => number): number {
-  const low = Math.log(searchRange.low)
-  const step = (Math.log(searchRange.high) - low) / 120
+function bestOf(objective: (logRho: number) => number, k: number): number {
+  const low = Math.log(closedFormRho(k) / searchFactor)
+  const step = (2 * Math.log(searchFactor)) / coarse
   let best = low
-  for (let index = 1; index <= 120; index += 1) {
+  let least = objective(low)
+  for (let index = 1; index <= coarse; index += 1) {
     const candidate = low + index * step
-    if (objective(candidate) < objective(best)) best = candidate
+    const value = objective(candidate)
+    if (value < least) [best, least] = [candidate, value]
   }
   return minimiseOn(objective, best - step, best + step, 1e-9)
 }

@@ -33,7 +33,7 @@ export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
   const voltage = response(network.nodeVoltage)
   const snubber = response(network.snubberCurrent)
   const energyUnit = edge.step ** 2 * node.capacitance
-  const overshoot = peakOf(voltage, poles).value - 1
+  const overshoot = Math.max(0, peakOf(voltage, poles).value - 1)
   return {
     peak: edge.from + edge.step * (1 + overshoot),
     overshoot,
@@ -41,7 +41,10 @@ export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
     dampingRatio: leastDamping(node),
     ringFrequency: ringFrequency(node),
     snubberEnergy: node.snubber ? (energyUnit * squareIntegral(snubber) * node.snubber.resistance) / z0 : 0,
-    seriesEnergy: energyUnit * squareIntegral(response(network.sourceCurrent)) * (node.seriesResistance / z0),
+    seriesEnergy:
+      node.seriesResistance === 0
+        ? 0
+        : (energyUnit * squareIntegral(response(network.sourceCurrent)) * node.seriesResistance) / z0,
     snubberPeakCurrent: node.snubber ? (peakMagnitudeOf(snubber, poles) * Math.abs(edge.step)) / z0 : 0,
   }
 }
