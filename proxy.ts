@@ -2,7 +2,8 @@ import { NextResponse, type NextRequest } from 'next/server'
 
 /**
  * Sets the security headers of every page. Nothing here decides who may see what: that is `lib/authz` alone.
- * Upload routes stay out of the matcher because a matched route has its body cut at 10 MB.
+ * Routes of evidence, reports and checks stay out of the matcher: a matched route has its body cut at 10 MB, and this
+ * policy would replace the stricter one of their answers.
  */
 export function proxy(request: NextRequest): NextResponse {
   const nonce = btoa(crypto.randomUUID())
@@ -33,4 +34,4 @@ function contentSecurityPolicy(nonce: string, isDevelopment: boolean): string {
   ].join('; ')
 }
 
-export const config = { matcher: ['/((?!_next/static|fonts/|api/evidence/upload|api/check).*)'] }
+export const config = { matcher: ['/((?!_next/static|fonts/|api/evidence/|api/reports/|api/check).*)'] }

@@ -49,7 +49,11 @@ export const EvidenceTable = ({ files, brief = false }: EvidenceTableProps) => (
             {
               key: 'hash',
               header: 'SHA-256',
-              cell: (file: EvidenceDto) => <Hash value={file.sha256} what={`SHA-256 of ${file.name}`} />,
+              cell: (file: EvidenceDto) => (
+                <span className="block w-max">
+                  <Hash value={file.sha256} what={`SHA-256 of ${file.name}`} />
+                </span>
+              ),
             },
           ]),
     ]}

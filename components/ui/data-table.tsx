@@ -85,7 +85,13 @@ export const DataTable = <Row,>({
 }: DataTableProps<Row>) => {
   if (rows.length === 0 && empty) return <>{empty}</>
   return (
-    <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto -outline-offset-2">
+    // The region holds what is placed absolutely in it, so that text for screen readers cannot widen the page.
+    <div
+      role="region"
+      aria-label={caption}
+      tabIndex={0}
+      className="relative overflow-x-auto -outline-offset-2"
+    >
       <table className="w-full border-collapse">
         <caption className={captionHidden ? 'sr-only' : 'px-4 py-2 text-left text-sm text-ink-soft sm:px-5'}>
           {caption}

@@ -19,7 +19,8 @@ export function attachment({ name, mediaType, sizeBytes, body }: Attachment): Re
       'content-disposition': dispositionOf(name),
       'x-content-type-options': 'nosniff',
       'content-security-policy': "sandbox; default-src 'none'",
-      'cache-control': 'private, no-store',
+      // Without a transformation the announced length stays true.
+      'cache-control': 'private, no-store, no-transform',
     },
   })
 }

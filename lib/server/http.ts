@@ -23,6 +23,12 @@ const statusOf: Readonly<Record<string, number>> = {
   no_space: 507,
 }
 
+/** Answers that are data and no page: no cache keeps them, and a browser that opens one runs and frames nothing. */
+const dataHeaders = {
+  'cache-control': 'private, no-store',
+  'content-security-policy': "default-src 'none'; frame-ancestors 'none'",
+}
+
 /** An error as RFC 9457 "problem details"; an expected failure without a status of its own is 409. */
 export function problem(error: ServiceError, requestId: string): Response {
   const status = statusOf[error.code] ?? 409
@@ -36,7 +42,7 @@ export function problem(error: ServiceError, requestId: string): Response {
   }
   return new Response(JSON.stringify(body), {
     status,
-    headers: { 'content-type': 'application/problem+json', 'cache-control': 'private, no-store' },
+    headers: { 'content-type': 'application/problem+json', ...dataHeaders },
   })
 }
 
@@ -87,5 +93,5 @@ export async function guarded(answer: (deps: Deps) => Promise<Response>): Promis
 
 /** JSON that holds a client's data: no cache may keep it. */
 export function privateJson(value: unknown): Response {
-  return Response.json(value, { headers: { 'cache-control': 'private, no-store' } })
+  return Response.json(value, { headers: dataHeaders })
 }

@@ -1,13 +1,11 @@
 import { createHash } from 'node:crypto'
-import { readdirSync, readFileSync } from 'node:fs'
+import { readdirSync } from 'node:fs'
 import path from 'node:path'
 
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 
-import type { Actor } from '@/lib/authz/actor'
 import { removeClient } from '@/lib/domain/engagements/people.service'
 import { capturePoints } from '@/lib/domain/evidence/capture.service'
-import { finishInterruptedChecks } from '@/lib/domain/evidence/check-capture'
 import {
   getEvidence,
   listEvidence,
@@ -17,9 +15,10 @@ import {
 import { announceUpload, receiveEvidence } from '@/lib/domain/evidence/upload.service'
 
 import { openTestEngagement, type TestEngagement } from '../support/engagement'
+import { sendCapture, sendEvidence, type SentFile } from '../support/evidence'
+import { bytesOf, pdfBytes, pngBytes, streamOf, zipBytes } from '../support/sample-files'
 import { openTestPortal, type TestPortal } from '../support/test-portal'
 import { valueOf } from '../support/value-of'
-import { bytesOf, captureText, pdfBytes, pngBytes, streamOf, zipBytes } from '../support/sample-files'
 
 let portal: TestPortal
 let osterby: TestEngagement
@@ -31,26 +30,7 @@ beforeEach(async () => {
 
 afterEach(() => portal.close())
 
-type Sent = {
-  readonly name: string
-  readonly bytes: Uint8Array
-  readonly announced?: number | null
-  readonly body?: ReadableStream<Uint8Array>
-}
-
-const send = ({ name, bytes, announced = bytes.byteLength, body }: Sent, actor: Actor = osterby.engineer) =>
-  receiveEvidence.execute(portal.deps, actor, {
-    engagementId: osterby.engagementId,
-    name,
-    contentLength: announced,
-    body: body ?? streamOf(bytes),
-  })
-
-const sendText = (name: string, text: string) => send({ name, bytes: bytesOf(text) })
-
-async function sendCapture(text = captureText()) {
-  return valueOf(await sendText('sw-node.csv', text))
-}
+const send = (file: SentFile) => sendEvidence(portal, osterby, file)
 
 const read = async (evidenceId: string) =>
   valueOf(await getEvidence.execute(portal.deps, osterby.engineer, { evidenceId }))
@@ -156,7 +136,9 @@ describe('UP1: what a file is, its bytes decide together with its name', () => {
   })
 
   it('a table of words is kept, marked as not readable, with the sentence that says what to do', async () => {
-    const received = valueOf(await sendText('notes.txt', 'we changed the gate resistor\nand it got better\n'))
+    const received = valueOf(
+      await send({ name: 'notes.txt', bytes: bytesOf('we changed the gate resistor\nand it got better\n') }),
+    )
     expect(received).toMatchObject({ status: 'refused', refusal: expect.stringContaining('numbers') })
     const file = await read(received.evidenceId)
     expect(file).toMatchObject({ status: 'refused', refusal: received.refusal, capture: null })
@@ -280,161 +262,10 @@ describe('UP3: a name is data only', () => {
   })
 })
 
-describe('a capture', () => {
-  it('is read at once: its time base, its channels in SI, and its samples to the last digit', async () => {
-    const { evidenceId, status } = await sendCapture(
-      'Time (ns),SW (mV),I (A)\n0,1,0.5\n2,-2.5,1\n4,3,1.5\n6,0,2\n',
-    )
-    expect(status).toBe('ready')
-    const { capture } = await read(evidenceId)
-    expect(capture).toMatchObject({ samples: 4, startSeconds: 0 })
-    expect(capture?.intervalSeconds).toBeCloseTo(2e-9, 20)
-    expect(capture?.channels).toMatchObject([
-      { name: 'SW', unit: 'V', minimum: -0.0025, maximum: 0.003 },
-      { name: 'I', unit: 'A', minimum: 0.5, maximum: 2 },
-    ])
-    const samples = readFileSync(portal.deps.files.pathOf(`${evidenceId}.ch0.f64`))
-    expect([...new Float64Array(new Uint8Array(samples).buffer)]).toEqual([0.001, -0.0025, 0.003, 0])
-  })
-
-  it('gives its points decimated without losing a spike, and the samples themselves when zoomed in', async () => {
-    const { evidenceId } = await sendCapture(captureText({ samples: 200_000, spikeAt: 123_456 }))
-    const points = async (view: object) =>
-      valueOf(
-        await capturePoints.execute(portal.deps, osterby.engineer, {
-          evidenceId,
-          channel: '0',
-          buckets: '500',
-          ...view,
-        }),
-      )
-    const whole = await points({})
-    expect(whole.x).toHaveLength(500)
-    expect(Math.max(...whole.max)).toBe(99)
-    expect(whole.x.every((x, index) => index === 0 || x > (whole.x[index - 1] ?? 0))).toBe(true)
-    const near = await points({ from: '123.450e-6', to: '123.460e-6' })
-    expect(near.x.length).toBeLessThan(20)
-    expect(near.min).toEqual(near.max)
-    const spike = near.max.indexOf(99)
-    expect(near.x[spike]).toBeCloseTo(123.456e-6, 12)
-  })
-
-  it('is asked only for channels that it has and a window that makes sense', async () => {
-    const { evidenceId } = await sendCapture()
-    const ask = (input: object) =>
-      capturePoints.execute(portal.deps, osterby.engineer, { evidenceId, ...input })
-    expect(await ask({ channel: '7' })).toMatchObject({ error: { code: 'no_such_channel' } })
-    expect(await ask({ from: 'x' })).toMatchObject({ error: { code: 'invalid_input' } })
-    expect((await ask({ from: '5', to: '-5' })).ok).toBe(true)
-    const { evidenceId: pdf } = valueOf(await send({ name: 'a.pdf', bytes: pdfBytes() }))
-    const none = await capturePoints.execute(portal.deps, osterby.engineer, { evidenceId: pdf })
-    expect(none).toMatchObject({ error: { code: 'not_a_capture' } })
-  })
-
-  it('whose check was cut off is checked at the next start', async () => {
-    const cutOff = { ...portal.deps, captures: { analyse: () => Promise.reject(new Error('stopped')) } }
-    const sent = receiveEvidence.execute(cutOff, osterby.engineer, {
-      engagementId: osterby.engagementId,
-      name: 'sw.csv',
-      contentLength: captureText().length,
-      body: streamOf(bytesOf(captureText())),
-    })
-    await expect(sent).rejects.toThrow('stopped')
-    const [row] = await storedRows()
-    expect(row?.status).toBe('checking')
-    expect(await finishInterruptedChecks(portal.deps)).toBe(1)
-    expect(await read(row?.id ?? '')).toMatchObject({ status: 'ready', capture: { samples: 100 } })
-  })
-})
-
-describe('the facts of a measurement', () => {
-  const facts = {
-    bandwidthHertz: '500 MHz',
-    probeAttenuation: '10x',
-    probeCapacitanceFarads: '9.5p',
-    groundMethod: 'lead',
-    groundLeadMetres: '150 mm',
-    probedAt: 'SW to source of Q2',
-    operatingCondition: '48 V, 2.5 A',
-  }
-  const state = (evidenceId: string, stated: object, actor: Actor = osterby.engineer) =>
-    stateFacts.execute(portal.deps, actor, { evidenceId, ...stated })
-
-  it('say what each missing one rules out, and cap the usable frequency at 20 MHz until a bandwidth is stated', async () => {
-    const { evidenceId } = await sendCapture()
-    const { capture } = await read(evidenceId)
-    expect(capture?.consequences.highestUsableHertz).toBe(20e6)
-    expect(capture?.consequences.missing.map((missing) => missing.fact)).toEqual([
-      'bandwidthHertz',
-      'probeAttenuation',
-      'probeCapacitanceFarads',
-      'groundMethod',
-      'probedAt',
-      'operatingCondition',
-    ])
-    expect(capture?.consequences.missing[0]?.rulesOut).toContain(
-      'cannot support a finding above 20.0\u00a0MHz',
-    )
-  })
-
-  it('are kept in SI; the usable frequency is the lower of bandwidth and a fifth of the sample rate', async () => {
-    const { evidenceId } = await sendCapture()
-    valueOf(await state(evidenceId, facts))
-    const { capture } = await read(evidenceId)
-    expect(capture?.facts).toEqual({
-      bandwidthHertz: 500e6,
-      probeAttenuation: 10,
-      probeCapacitanceFarads: 9.5e-12,
-      groundMethod: 'lead',
-      groundLeadMetres: 0.15,
-      probedAt: 'SW to source of Q2',
-      operatingCondition: '48 V, 2.5 A',
-    })
-    expect(capture?.consequences.missing).toEqual([])
-    expect(capture?.consequences.highestUsableHertz).toBeCloseTo(200e6, 0)
-    expect(capture?.lastStated).toEqual({ by: osterby.engineer.name, at: portal.clock.now() })
-  })
-
-  it('name the ring of the ground lead: 150 nH and 10 pF ring at 130 MHz', async () => {
-    const { evidenceId } = await sendCapture()
-    const { remarks } = valueOf(await state(evidenceId, { ...facts, probeCapacitanceFarads: '10p' }))
-    expect(remarks.some((remark) => remark.includes('130\u00a0MHz'))).toBe(true)
-  })
-
-  it('are taken back by an empty entry, and a lead length is dropped with the lead', async () => {
-    const { evidenceId } = await sendCapture()
-    valueOf(await state(evidenceId, facts))
-    valueOf(await state(evidenceId, { ...facts, bandwidthHertz: '', groundMethod: 'spring' }))
-    const { capture } = await read(evidenceId)
-    expect(capture?.facts).toMatchObject({
-      bandwidthHertz: null,
-      groundMethod: 'spring',
-      groundLeadMetres: null,
-    })
-  })
-
-  it.each([
-    ['bandwidthHertz', '-1M'],
-    ['bandwidthHertz', '500 V'],
-    ['probeAttenuation', 'ten'],
-    ['groundMethod', 'glue'],
-    ['status', 'ready'],
-  ])('AZ6: %s = %j is refused', async (field, value) => {
-    const { evidenceId } = await sendCapture()
-    const refused = await state(evidenceId, { ...facts, [field]: value })
-    expect(refused).toMatchObject({ error: { code: 'invalid_input' } })
-  })
-
-  it('belong to captures only', async () => {
-    const { evidenceId } = valueOf(await send({ name: 'a.pdf', bytes: pdfBytes() }))
-    expect(await state(evidenceId, facts)).toMatchObject({ error: { code: 'not_a_capture' } })
-  })
-})
-
 describe('AZ2: foreign evidence', () => {
   it('answers every step exactly as an unknown id', async () => {
     const larkfield = await openTestEngagement(portal, 'Larkfield Rail Sensors')
-    const { evidenceId } = await sendCapture()
+    const { evidenceId } = await sendCapture(portal, osterby)
     const unknownId = portal.deps.ids.newId()
     for (const actor of [larkfield.purchaser, larkfield.engineer, larkfield.consultant]) {
       const answers = (file: string, engagementId: string) =>
@@ -460,7 +291,7 @@ describe('AZ2: foreign evidence', () => {
   })
 
   it('is closed to an administrator who is not on the engagement', async () => {
-    const { evidenceId } = await sendCapture()
+    const { evidenceId } = await sendCapture(portal, osterby)
     const { administrator, engagementId } = osterby
     expect(await getEvidence.execute(portal.deps, administrator, { evidenceId })).toMatchObject({
       error: { code: 'not_permitted' },
