@@ -1,0 +1,13 @@
+import 'server-only'
+
+import type { Db, Tx } from '@/db/client'
+
+/** All minutes that were posted to an engagement, by whomever. */
+export async function postedMinutesOf(db: Db | Tx, engagementId: string): Promise<number> {
+  const row = await db
+    .selectFrom('time_entry')
+    .select((select) => select.fn.sum<number>('posted_minutes').as('minutes'))
+    .where('engagement_id', '=', engagementId)
+    .executeTakeFirst()
+  return row?.minutes ?? 0
+}
