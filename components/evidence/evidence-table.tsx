@@ -50,7 +50,7 @@ export const EvidenceTable = ({ files, brief = false }: EvidenceTableProps) => (
               key: 'hash',
               header: 'SHA-256',
               cell: (file: EvidenceDto) => (
-                <span className="block w-max">
+                <span className="block min-w-60">
                   <Hash value={file.sha256} what={`SHA-256 of ${file.name}`} />
                 </span>
               ),

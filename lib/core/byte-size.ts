@@ -2,6 +2,7 @@ const steps = ['bytes', 'KiB', 'MiB', 'GiB', 'TiB'] as const
 
 /** "312 bytes", "1.5 MiB": binary prefixes as in IEC 80000-13, three digits. */
 export function byteSizeInWords(bytes: number): string {
+  if (bytes === 1) return '1\u00a0byte'
   let value = bytes
   let step = 0
   while (value >= 1024 && step < steps.length - 1) {

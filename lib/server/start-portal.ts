@@ -1,10 +1,11 @@
 import 'server-only'
 
 import { pendingMigrations } from '@/db/migrate'
+import { finishInterruptedChecks } from '@/lib/domain/evidence/check-capture'
 
 import { container } from './container'
 
-/** Reads the settings, opens the database and makes sure that its schema is the one of this build. */
+/** Reads the settings, opens the database, makes sure that its schema is this build's, and takes up cut-off checks. */
 export async function startPortal(): Promise<void> {
   try {
     const { deps, log, env } = container()
@@ -13,7 +14,8 @@ export async function startPortal(): Promise<void> {
       const names = pending.map((migration) => migration.name).join(', ')
       throw new Error(`The database lacks ${names}. Run: npm run migrate`)
     }
-    log.info({ publicUrl: env.publicUrl }, 'portal started')
+    const checksTakenUp = await finishInterruptedChecks(deps)
+    log.info({ publicUrl: env.publicUrl, checksTakenUp }, 'portal started')
   } catch (error) {
     process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`)
     process.exit(1)

@@ -85,19 +85,41 @@ describe('a capture', () => {
     expect(none).toMatchObject({ error: { code: 'not_a_capture' } })
   })
 
-  it('whose check was cut off is checked at the next start', async () => {
-    const cutOff = { ...portal.deps, captures: { analyse: () => Promise.reject(new Error('stopped')) } }
-    const sent = receiveEvidence.execute(cutOff, osterby.engineer, {
-      engagementId: osterby.engagementId,
-      name: 'sw.csv',
-      contentLength: captureText().length,
-      body: streamOf(bytesOf(captureText())),
+  describe('whose check was cut off', () => {
+    const stopping = () => ({
+      ...portal.deps,
+      captures: { analyse: () => Promise.reject(new Error('stopped')) },
     })
-    await expect(sent).rejects.toThrow('stopped')
-    const [row] = await portal.db.selectFrom('evidence').selectAll().execute()
-    expect(row?.status).toBe('checking')
-    expect(await finishInterruptedChecks(portal.deps)).toBe(1)
-    expect(await read(row?.id ?? '')).toMatchObject({ status: 'ready', capture: { samples: 100 } })
+
+    async function sendAndStop(): Promise<string> {
+      const bytes = bytesOf(captureText())
+      const sent = receiveEvidence.execute(stopping(), osterby.engineer, {
+        engagementId: osterby.engagementId,
+        name: 'sw.csv',
+        contentLength: bytes.byteLength,
+        body: streamOf(bytes),
+      })
+      await expect(sent).rejects.toThrow('stopped')
+      const [row] = await portal.db.selectFrom('evidence').selectAll().execute()
+      expect(row?.status).toBe('checking')
+      return row?.id ?? ''
+    }
+
+    it('is checked at the next start', async () => {
+      const evidenceId = await sendAndStop()
+      expect(await finishInterruptedChecks(portal.deps)).toBe(1)
+      expect(await read(evidenceId)).toMatchObject({ status: 'ready', capture: { samples: 100 } })
+    })
+
+    it('and cut off again is marked as not readable and does not stop the start', async () => {
+      const evidenceId = await sendAndStop()
+      await finishInterruptedChecks(stopping())
+      expect(await read(evidenceId)).toMatchObject({
+        status: 'refused',
+        refusal: expect.stringContaining('cut off twice'),
+      })
+      expect(await finishInterruptedChecks(portal.deps)).toBe(0)
+    })
   })
 })
 

@@ -29,12 +29,24 @@ export async function checkCapture(deps: CheckDeps, evidenceId: string): Promise
   return { status: 'ready', refusal: null }
 }
 
-/** Takes up the checks that a stop of the portal cut off; meant for the start, before anything is served. */
+/**
+ * Takes up the checks that a stop of the portal cut off; meant for its start. A file whose check fails again in a way
+ * that nobody expected is marked as not readable, so that it cannot keep the portal from starting.
+ */
 export async function finishInterruptedChecks(deps: CheckDeps): Promise<number> {
   const unchecked = await listUncheckedEvidence(deps.db)
-  for (const { id } of unchecked) await checkCapture(deps, id)
+  for (const { id } of unchecked) {
+    try {
+      await checkCapture(deps, id)
+    } catch {
+      await withTx(deps.db, (tx) => markEvidenceRefused(tx, id, checkFailed))
+    }
+  }
   return unchecked.length
 }
+
+const checkFailed =
+  'The check of this file was cut off twice on our side. The file is kept; tell the practice, or send it again.'
 
 const captureRow = (evidenceId: string, summary: CaptureSummary) => ({
   evidence_id: evidenceId,
