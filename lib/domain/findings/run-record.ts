@@ -1,5 +1,6 @@
 import { z } from 'zod'
 
+import type { Figure } from '@/lib/core/figure/figure'
 import { units } from '@/lib/core/units/unit'
 
 /** What a run keeps as JSON. The zod schemas read the rows back; the types are made of them. */
@@ -120,8 +121,8 @@ export const parseInputs = (text: string): RunInputs => runInputs.parse(JSON.par
 export const parseResult = (text: string): RunResult => runResult.parse(JSON.parse(text))
 export const parseFigures = (text: string): RunFigures => runFigures.parse(JSON.parse(text))
 
-/** An outcome as it reads back from its row. */
-export const asStored = ({ figures, ...result }: RunOutcome): RunOutcome => ({
+/** A result with its figures as they read back from their row, so that fresh and stored ones compare equal. */
+export const asStored = (result: RunResult, figures: readonly Figure[]): RunOutcome => ({
   ...parseResult(JSON.stringify(result)),
   figures: parseFigures(JSON.stringify(figures)),
 })

@@ -1,0 +1,20 @@
+import type { MethodRun } from '@/lib/core/method/run-method'
+
+import { asStored, type RunOutcome } from './run-record'
+
+/** What a method gave, in the shape in which runs keep it. */
+export const outcomeOf = ({ outcome }: MethodRun): RunOutcome =>
+  asStored(
+    {
+      absence: null,
+      results: [...outcome.results],
+      choices: outcome.choices.map(({ title, columns, rows }) => ({
+        title,
+        columns: [...columns],
+        rows: rows.map((row) => [...row]),
+      })),
+      validity: [...outcome.validity],
+      warnings: [],
+    },
+    outcome.figures,
+  )

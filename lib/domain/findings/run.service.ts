@@ -1,0 +1,100 @@
+import 'server-only'
+
+import { listRunsOf } from '@/db/repositories/method-run.repo'
+import { withTx } from '@/db/tx'
+import { notFound } from '@/lib/authz/authorize'
+import { findMethod, methods } from '@/lib/core/method/registry'
+import type { MethodRun } from '@/lib/core/method/run-method'
+import { err, ok } from '@/lib/core/result'
+
+import { engagementFor } from '../engagements/engagement-resource'
+import { operation } from '../operation'
+import { outcomeOf } from './method-outcome'
+import { methodDefinition } from './run-definition'
+import { runHeadingOf } from './run-dto'
+import type { RunInputs } from './run-record'
+import { loadRun, readableRun } from './run-resource'
+import { inputsRefused, noSuchMethod } from './runs.errors'
+import { engagementIdSchema, openMethodSchema, runIdSchema, runMethodSchema } from './runs.schema'
+import { storeRun } from './store-run'
+import { takeInputs, type TakenInputs } from './take-inputs'
+
+/** Runs a method on typed values and on results of earlier runs, and keeps inputs, origins and all results. */
+export const runMethod = operation('runs.runMethod', runMethodSchema, async (deps, actor, input) =>
+  withTx(deps.db, async (tx) => {
+    const engagement = await engagementFor(tx, actor, 'run.create', input.engagementId)
+    if (!engagement.ok) return engagement
+    const method = findMethod(input.methodId)
+    if (!method) return err(noSuchMethod)
+    const taken = await takeInputs(tx, input.engagementId, method, input.inputs)
+    if (!taken.ok) {
+      const fields = Object.entries(taken.error).map(([key, sentence]) => [`inputs.${key}.pick`, sentence])
+      return err(inputsRefused(someInputs, Object.fromEntries(fields)))
+    }
+    const run = method.run(taken.value.raw)
+    if (!run.ok) return err(inputsRefused(run.error, fieldsOf(run.error.fields, taken.value)))
+    return ok(
+      await storeRun(tx, deps, actor, {
+        engagementId: input.engagementId,
+        methodId: method.id,
+        methodVersion: method.version,
+        inputs: inputsOf(run.value, taken.value),
+        outcome: outcomeOf(run.value),
+        evidence: taken.value.evidence,
+      }),
+    )
+  }),
+)
+
+/** The runs of an engagement, newest first, with their results. */
+export const listRuns = operation('runs.list', engagementIdSchema, async (deps, actor, input) => {
+  const engagement = await engagementFor(deps.db, actor, 'run.read', input.engagementId)
+  if (!engagement.ok) return engagement
+  const rows = await listRunsOf(deps.db, input.engagementId)
+  return ok(rows.map(runHeadingOf))
+})
+
+/** One run with everything behind its numbers. */
+export const getRun = operation('runs.get', runIdSchema, async (deps, actor, input) => {
+  const run = await readableRun(deps.db, actor, input.runId)
+  return run.ok ? ok(await loadRun(deps.db, run.value.row)) : run
+})
+
+/** The methods that the bench offers. */
+export const listMethods = operation('runs.listMethods', engagementIdSchema, async (deps, actor, input) => {
+  const engagement = await engagementFor(deps.db, actor, 'run.create', input.engagementId)
+  if (!engagement.ok) return engagement
+  return ok(methods.map(({ id, title, purpose }) => ({ methodId: id, title, purpose })))
+})
+
+/** The definition that the form of a method is made from. */
+export const getMethod = operation('runs.getMethod', openMethodSchema, async (deps, actor, input) => {
+  const engagement = await engagementFor(deps.db, actor, 'run.create', input.engagementId)
+  if (!engagement.ok) return engagement
+  const definition = methodDefinition(input.methodId)
+  return definition ? ok(definition) : err(notFound)
+})
+
+const someInputs = { code: 'invalid_input', message: 'Some inputs need another look.', fields: {} } as const
+
+const inputsOf = (run: MethodRun, { picked, texts }: TakenInputs): RunInputs => ({
+  trace: null,
+  values: Object.fromEntries(
+    Object.entries(run.values).map(([key, value]) => [
+      key,
+      picked[key] ?? { by: 'typed', value, text: texts[key] ?? '' },
+    ]),
+  ),
+})
+
+/** Marks the entry that a refusal is about: the list where the value was picked, else the text. */
+const fieldsOf = (
+  refused: Readonly<Record<string, string>>,
+  { picked }: TakenInputs,
+): Readonly<Record<string, string>> =>
+  Object.fromEntries(
+    Object.entries(refused).map(([key, sentence]) => [
+      `inputs.${key}.${picked[key] ? 'pick' : 'text'}`,
+      sentence,
+    ]),
+  )
