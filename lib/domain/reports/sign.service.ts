@@ -80,12 +80,9 @@ export const signReport = operation('reports.sign', signReportSchema, async (dep
     if (isLast) await mailRelease(tx, deps, row, engagement)
     return true
   })
-  if (!isMoved) {
-    await deps.files.remove(fileId)
-    return err(stepNotOpen('signed'))
-  }
-  if (row.file_id) await deps.files.remove(row.file_id)
-  return ok({ reportId: row.id, role: role.value })
+  if (isMoved) return ok({ reportId: row.id, role: role.value })
+  await deps.files.remove(fileId)
+  return err(stepNotOpen('signed'))
 })
 
 function roleOf(row: ReportRow, actor: Actor): Result<Role, ReportError> {
