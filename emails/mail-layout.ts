@@ -32,24 +32,32 @@ const page = (content: MailContent, practice: Practice): Html =>
         </style>
       </head>
       <body class="ground" style="${style.body}">
-        <table role="presentation" class="ground" style="${style.frame}" cellpadding="0" cellspacing="0">
-          <tr>
-            <td align="center" style="padding:24px 12px">
-              <table role="presentation" class="sheet" style="${style.sheet}" cellpadding="0" cellspacing="0">
-                <tr>
-                  <td style="${style.cell}">
-                    <p class="soft" style="${style.practice}">${practice.name}</p>
-                    <h1 class="ink" style="${style.heading}">${content.heading}</h1>
-                    ${content.blocks.map(block)}
-                    <p class="faint" style="${style.foot}">
-                      ${content.reason}<br />${practice.name}${practice.address ? `, ${practice.address}` : ''}
-                    </p>
-                  </td>
-                </tr>
-              </table>
-            </td>
-          </tr>
-        </table>
+        <div role="main">
+          <table role="presentation" class="ground" style="${style.frame}" cellpadding="0" cellspacing="0">
+            <tr>
+              <td align="center" style="padding:24px 12px">
+                <table
+                  role="presentation"
+                  class="sheet"
+                  style="${style.sheet}"
+                  cellpadding="0"
+                  cellspacing="0"
+                >
+                  <tr>
+                    <td style="${style.cell}">
+                      <p class="soft" style="${style.practice}">${practice.name}</p>
+                      <h1 class="ink" style="${style.heading}">${content.heading}</h1>
+                      ${content.blocks.map(block)}
+                      <p class="faint" style="${style.foot}">
+                        ${content.reason}<br />${practice.name}${practice.address ? `, ${practice.address}` : ''}
+                      </p>
+                    </td>
+                  </tr>
+                </table>
+              </td>
+            </tr>
+          </table>
+        </div>
       </body>
     </html> `
 
