@@ -19,7 +19,7 @@ export const OscillatorRows = () => {
           key={row}
           role="group"
           aria-label={`Oscillator ${position + 1}`}
-          className="grid items-end gap-x-4 gap-y-3 border-b border-rule pb-4 sm:grid-cols-[minmax(0,2fr)_minmax(0,1fr)_minmax(0,1fr)_auto]"
+          className="grid items-start gap-x-4 gap-y-3 border-b border-rule pb-4 sm:grid-cols-[minmax(0,2fr)_minmax(0,1fr)_minmax(0,1fr)_auto]"
         >
           <FormText name={`oscillators.${position}.name`} label="Name" />
           <FormQuantity name={`oscillators.${position}.frequency`} label="Frequency" unit="Hz" hint={null} />
@@ -29,7 +29,12 @@ export const OscillatorRows = () => {
             unit="ppm"
             hint={null}
           />
-          <Button tone="quiet" onClick={() => remove(row)} aria-label={`Remove oscillator ${position + 1}`}>
+          <Button
+            tone="quiet"
+            className="sm:mt-6"
+            onClick={() => remove(row)}
+            aria-label={`Remove oscillator ${position + 1}`}
+          >
             Remove
           </Button>
         </div>

@@ -77,6 +77,15 @@ describe('a brief', () => {
     [{ goalTestDate: '2027-02-30' }, 'goalTestDate'],
     [{ title: '  ' }, 'title'],
     [{ oscillators: [{ name: 'X', frequency: '', tolerancePpm: '5' }] }, 'oscillators.0.frequency'],
+    [
+      {
+        oscillators: [
+          { name: '', frequency: '' },
+          { name: 'X', frequency: 'fast', tolerancePpm: '5' },
+        ],
+      },
+      'oscillators.1.frequency',
+    ],
   ])('with %j gets its sentence at %s', async (change, field) => {
     const { companyId, engineer } = osterby
     const refused = await openEngagement.execute(portal.deps, engineer, { ...aBrief, companyId, ...change })

@@ -27,11 +27,11 @@ const oscillator = z.strictObject({
   ),
 })
 
-/** A row of the form that was left empty altogether says nothing and is dropped. */
-const withoutEmptyRows = (rows: unknown): unknown =>
-  Array.isArray(rows)
-    ? rows.filter((row: unknown) => Object.values(Object(row)).some((entry) => String(entry).trim() !== ''))
-    : rows
+/** A row of the form that was left empty altogether says nothing; it is dropped last, so that errors keep their row. */
+const oscillatorOrEmpty = z.preprocess((row) => (isEmptyRow(row) ? null : row), oscillator.nullable())
+
+const isEmptyRow = (row: unknown): boolean =>
+  typeof row === 'object' && Object.values(row ?? {}).every((entry) => String(entry).trim() === '')
 
 export const openEngagementSchema = z.strictObject({
   companyId: idField,
@@ -47,10 +47,11 @@ export const openEngagementSchema = z.strictObject({
   switchingFrequency: optionalQuantity('Hz', { positive: true }),
   spreadSpectrum: optionalText('Spread spectrum', 200),
   alreadyTried: optionalText('What was tried', 5000),
-  oscillators: z.preprocess(
-    withoutEmptyRows,
-    z.array(oscillator).max(20, 'At most 20 oscillators; name the ones nearest to the trouble.').default([]),
-  ),
+  oscillators: z
+    .array(oscillatorOrEmpty)
+    .max(20, 'At most 20 oscillators; name the ones nearest to the trouble.')
+    .default([])
+    .transform((rows) => rows.filter((row) => row !== null)),
 })
 
 export type OpenEngagement = z.output<typeof openEngagementSchema>
