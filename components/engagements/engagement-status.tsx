@@ -1,6 +1,8 @@
-import type { EngagementStatus as Status } from '@/db/tables/engagements'
+import type { EngagementHeading } from '@/lib/domain/engagements/engagement-dto'
 
 import { StatusMark, type StatusKind } from '../ui/status-mark'
+
+type Status = EngagementHeading['status']
 
 const marks: Record<Status, { readonly kind: StatusKind; readonly words: string }> = {
   briefed: { kind: 'waiting', words: 'Waits for a scope' },

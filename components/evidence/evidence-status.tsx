@@ -1,6 +1,8 @@
-import type { EvidenceStatus as Status } from '@/db/tables/evidence'
+import type { EvidenceDto } from '@/lib/domain/evidence/evidence-dto'
 
 import { StatusMark, type StatusKind } from '../ui/status-mark'
+
+type Status = EvidenceDto['status']
 
 const marks: Record<Status, { readonly kind: StatusKind; readonly words: string }> = {
   checking: { kind: 'waiting', words: 'Being checked' },
