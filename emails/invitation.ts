@@ -1,6 +1,6 @@
 import type { Mail } from '@/lib/domain/mail'
 
-import { facts, link, note, paragraph, type MailContent, type Practice } from './mail-content'
+import { facts, figure, link, note, paragraph, word, type MailContent, type Practice } from './mail-content'
 import { writtenInstant } from './written-values'
 
 type Invitation = Extract<Mail, { kind: 'invitation' }>
@@ -20,9 +20,9 @@ export function invitationMail(invitation: Invitation, practice: Practice): Mail
     blocks: [
       paragraph(`As ${invitation.role} for ${company} you can ${tasks[invitation.role]}.`),
       facts(
-        { label: 'Company', value: company },
-        { label: 'Role', value: invitation.role },
-        { label: 'Open until', value: writtenInstant(invitation.expiresAt) },
+        word('Company', company),
+        word('Role', invitation.role),
+        figure('Open until', writtenInstant(invitation.expiresAt)),
       ),
       link('Open the invitation', invitation.link),
       note(

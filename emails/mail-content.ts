@@ -3,7 +3,12 @@ export type Practice = { readonly name: string; readonly address: string }
 
 export type RenderedMail = { readonly subject: string; readonly html: string; readonly text: string }
 
-export type Fact = { readonly label: string; readonly value: string; readonly isTotal?: boolean }
+export type Fact = {
+  readonly label: string
+  readonly value: string
+  /** Figures line up in the monospaced face; the total of a column stands out. */
+  readonly set: 'word' | 'figure' | 'total'
+}
 
 export type Block =
   | { readonly kind: 'paragraph'; readonly text: string }
@@ -22,5 +27,8 @@ export type MailContent = {
 
 export const paragraph = (text: string): Block => ({ kind: 'paragraph', text })
 export const link = (label: string, href: string): Block => ({ kind: 'link', label, href })
+export const word = (label: string, value: string): Fact => ({ label, value, set: 'word' })
+export const figure = (label: string, value: string): Fact => ({ label, value, set: 'figure' })
+export const total = (label: string, value: string): Fact => ({ label, value, set: 'total' })
 export const facts = (...rows: readonly Fact[]): Block => ({ kind: 'facts', facts: rows })
 export const note = (text: string): Block => ({ kind: 'note', text })

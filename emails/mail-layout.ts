@@ -79,12 +79,14 @@ function block(part: Block): Html {
   }
 }
 
-const row = ({ label, value, isTotal = false }: Fact): Html => {
-  const total = isTotal ? `;${style.total}` : ''
-  const ink = isTotal ? 'row ink' : 'row'
+const row = ({ label, value, set }: Fact): Html => {
+  const weight = set === 'total' ? `;${style.total}` : ''
+  const face = set === 'word' ? '' : `;${style.figure}`
   return html`<tr>
-    <th scope="row" class="${isTotal ? 'row ink' : 'soft'}" style="${style.label}${total}">${label}</th>
-    <td class="${ink}" style="${style.value}${total}">${value}</td>
+    <th scope="row" class="${set === 'total' ? 'row ink' : 'soft'}" style="${style.label}${weight}">
+      ${label}
+    </th>
+    <td class="${set === 'total' ? 'row ink' : 'row'}" style="${style.value}${face}${weight}">${value}</td>
   </tr> `
 }
 

@@ -18,7 +18,8 @@ export const style = {
   facts: 'width:100%;border-collapse:collapse;margin:0 0 20px',
   label:
     'padding:6px 16px 6px 0;border-bottom:1px solid #e7dcc5;color:#415070;font-weight:400;text-align:left',
-  value: `padding:6px 0;border-bottom:1px solid #e7dcc5;font-family:${mono};font-size:15px;text-align:right`,
+  value: 'padding:6px 0;border-bottom:1px solid #e7dcc5;text-align:right',
+  figure: `font-family:${mono};font-size:15px`,
   total: 'font-weight:600;color:#1b2a4a',
   note: 'margin:0 0 16px;padding:0 0 0 12px;border-left:3px solid #d9cdb3;color:#415070;font-size:15px;line-height:22px',
   foot: 'margin:24px 0 0;padding:16px 0 0;border-top:1px solid #d9cdb3;font-size:13px;line-height:18px;color:#59647c',

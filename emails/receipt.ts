@@ -1,6 +1,6 @@
 import type { Mail } from '@/lib/domain/mail'
 
-import { facts, paragraph, type MailContent, type Practice } from './mail-content'
+import { facts, figure, paragraph, total, word, type MailContent, type Practice } from './mail-content'
 import { writtenDay, writtenHours, writtenMoney } from './written-values'
 
 type Receipt = Extract<Mail, { kind: 'receipt' }>
@@ -15,16 +15,16 @@ export function receiptMail(receipt: Receipt, practice: Practice): MailContent {
         `Thank you. ${writtenHours(receipt.minutes)} were added to the account of ${receipt.companyName}.`,
       ),
       facts(
-        { label: 'Block', value: receipt.title },
-        { label: 'Hours', value: writtenHours(receipt.minutes) },
-        { label: 'Paid on', value: writtenDay(receipt.paidAt) },
-        { label: 'Net', value: money(receipt.netCents) },
-        { label: receipt.taxLabel, value: money(receipt.taxCents) },
-        { label: 'Total paid', value: money(receipt.grossCents), isTotal: true },
+        word('Block', receipt.title),
+        figure('Hours', writtenHours(receipt.minutes)),
+        figure('Paid on', writtenDay(receipt.paidAt)),
+        figure('Net', money(receipt.netCents)),
+        figure(receipt.taxLabel, money(receipt.taxCents)),
+        total('Total paid', money(receipt.grossCents)),
       ),
       facts(
-        { label: 'Balance after this purchase', value: writtenHours(receipt.balanceMinutes) },
-        { label: 'These hours are valid until', value: writtenDay(receipt.validUntil) },
+        figure('Balance after this purchase', writtenHours(receipt.balanceMinutes)),
+        figure('These hours are valid until', writtenDay(receipt.validUntil)),
       ),
     ],
     reason: `You receive this because you bought hours for ${receipt.companyName}.`,

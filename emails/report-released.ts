@@ -1,6 +1,6 @@
 import type { Mail } from '@/lib/domain/mail'
 
-import { facts, link, note, paragraph, type MailContent } from './mail-content'
+import { facts, figure, link, note, paragraph, word, type MailContent } from './mail-content'
 
 type ReportReleased = Extract<Mail, { kind: 'report_released' }>
 
@@ -12,10 +12,10 @@ export function reportReleasedMail(report: ReportReleased): MailContent {
     blocks: [
       paragraph('It was reviewed and signed by its author and by a reviewer who did not write it.'),
       facts(
-        { label: 'Engagement', value: report.engagementTitle },
-        { label: 'Report', value: report.reportNumber },
-        { label: 'Revision', value: String(report.revision) },
-        { label: 'Check code', value: report.checkCode },
+        word('Engagement', report.engagementTitle),
+        word('Report', report.reportNumber),
+        figure('Revision', String(report.revision)),
+        figure('Check code', report.checkCode),
       ),
       link('Open the report', report.link),
       paragraph('Anybody who holds the file can check its signatures, and whether it is still current.'),

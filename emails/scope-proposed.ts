@@ -1,6 +1,6 @@
 import type { Mail } from '@/lib/domain/mail'
 
-import { facts, link, note, paragraph, type MailContent } from './mail-content'
+import { facts, figure, link, note, paragraph, word, type MailContent } from './mail-content'
 import { writtenHours } from './written-values'
 
 type ScopeProposed = Extract<Mail, { kind: 'scope_proposed' }>
@@ -12,9 +12,9 @@ export function scopeProposedMail(scope: ScopeProposed): MailContent {
     blocks: [
       paragraph(`${scope.proposedBy} has written down what is to be done and how long it may take at most.`),
       facts(
-        { label: 'Engagement', value: scope.engagementTitle },
-        { label: 'Proposed by', value: scope.proposedBy },
-        { label: 'Hours at most', value: writtenHours(scope.capMinutes) },
+        word('Engagement', scope.engagementTitle),
+        word('Proposed by', scope.proposedBy),
+        figure('Hours at most', writtenHours(scope.capMinutes)),
       ),
       link('Read the scope', scope.link),
       note('No time is booked under this scope before you approve it, and none past its cap.'),

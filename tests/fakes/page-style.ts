@@ -34,7 +34,8 @@ td button { min-height: 2rem; padding: .125rem .5rem; font-size: .875rem }
 .refusal { margin: 0 0 1rem; padding: .75rem 1rem; background: var(--red-wash); border-left: 4px solid var(--red) }
 .scroll { overflow-x: auto } table { border-collapse: collapse; width: 100%; background: var(--sheet); font-size: .9375rem }
 th, td { padding: .5rem .75rem; border: 1px solid var(--rule); text-align: left; vertical-align: top } th { color: var(--soft); font-weight: 600 }
-td.num { text-align: right; white-space: nowrap }
+td { min-width: 7rem } td.num { text-align: right; white-space: nowrap } td.code { font-family: Figures, monospace; font-size: .875rem }
+dl.plain dd { text-align: left }
 pre { white-space: pre-wrap; overflow-wrap: anywhere; background: var(--sheet); border: 1px solid var(--rule); padding: 1rem; font: .9375rem/1.5 Figures, monospace }
 iframe { width: 100%; height: 46rem; border: 1px solid var(--rule); background: var(--sheet) }
 `

@@ -40,7 +40,7 @@ export const outboxPage = (messages: readonly FakeMessage[], recipient: string):
 
 const row = (message: FakeMessage): Html =>
   html`<tr>
-    <td class="num">${message.createdAt.slice(0, 19).replace('T', ' ')}</td>
+    <td class="code">${message.createdAt.slice(0, 19).replace('T', ' ')}</td>
     <td>${message.to.join(', ')}</td>
     <td><a href="/messages/${message.id}">${message.subject}</a></td>
   </tr>`
@@ -50,7 +50,7 @@ export const messagePage = (message: FakeMessage): FakeReply =>
     title: message.subject,
     banner,
     isWide: true,
-    body: html`<dl>
+    body: html`<dl class="plain">
         <dt>From</dt>
         <dd>${message.from}</dd>
         <dt>To</dt>

@@ -39,7 +39,9 @@ export const panelPage = (account: Account, webhooks: Webhooks, troublesWaiting:
             )
       }
       <h2>Payouts to the bank</h2>
-      <p>${account.store.payouts.size} so far. ${action('/panel/pay-out', {}, 'Pay out what is there')}</p>
+      <div>
+        ${account.store.payouts.size} so far. ${action('/panel/pay-out', {}, 'Pay out what is there')}
+      </div>
       <h2>Events</h2>
       ${
         webhooks.records.size === 0
@@ -110,7 +112,7 @@ function sessionRow(account: Account, session: WireSession): Html {
     ...(intent?.status === 'succeeded' ? [act('refund', 'Return all'), act('dispute', 'Dispute')] : []),
   ]
   return html`<tr>
-    <td class="num"><a href="/pay/${session.id}">${session.id}</a></td>
+    <td class="code"><a href="/pay/${session.id}">${session.id}</a></td>
     <td>${account.store.titles.get(session.id) ?? ''}</td>
     <td class="num">${writtenAmount(session.amount_total, session.currency)}</td>
     <td>${session.status}, ${session.payment_status}</td>
@@ -120,7 +122,7 @@ function sessionRow(account: Account, session: WireSession): Html {
 
 const eventRow = ({ event, attempts, isDelivered }: EventRecord): Html =>
   html`<tr>
-    <td class="num">${event.id}</td>
+    <td class="code">${event.id}</td>
     <td>${event.type}</td>
     <td>${isDelivered ? 'delivered' : 'not delivered'} (${attempts.join(', ') || 'not sent'})</td>
     <td>${action('/panel/redeliver', { id: event.id }, 'Send again')}</td>
