@@ -8,7 +8,7 @@ import {
   overshootOf,
   withSnubber,
 } from '@/lib/core/snubber/optimum'
-import { switchEdge } from '@/lib/core/snubber/switched-edge'
+import { nodeRiseTime, switchEdge } from '@/lib/core/snubber/switched-edge'
 
 import { expectWithin, input, referenceCases } from './reference-cases'
 
@@ -65,7 +65,7 @@ describe('one switched edge', () => {
     expectWithin(item, {
       peak: outcome.peak,
       overshoot_fraction: outcome.overshoot,
-      rise_time_10_90: outcome.riseTime,
+      rise_time_10_90: nodeRiseTime(node, edge),
       damping_ratio_min: outcome.dampingRatio,
       ring_frequency_damped: outcome.ringFrequency ?? 0,
       E_R: outcome.seriesEnergy,

@@ -1,13 +1,13 @@
 import { add, complex, magnitude, scale, type Complex } from './complex'
 
 /** Roots nearer than this to each other, relative to their size, are moved apart to it. */
-const ofTwo = 1e-6
-const ofThree = 1e-4
+const ofTwo = 1e-4
+const ofThree = 2e-3
 
 /**
  * Up to three roots of a real polynomial, moved apart where they coincide, so that partial fractions over simple roots
- * hold: about their mean, which rounding leaves accurate. It changes a response by the square of the distance, 1e-12 of
- * it for two roots and 1e-8 for three.
+ * hold: about their mean, which rounding leaves accurate. It changes a response by about the square of the distance,
+ * 1e-8 for two roots and 4e-6 for three; the distances keep the rounding of a squared response at the same size.
  */
 export function separate(roots: readonly Complex[]): readonly Complex[] {
   const [a, b, c] = roots

@@ -12,6 +12,8 @@ export type InputDefinition = {
   readonly above?: number
   readonly atLeast?: number
   readonly atMost?: number
+  /** What a form offers where nothing is known of the value: "5 %" for a part. */
+  readonly usualTolerance?: string
 }
 
 /** One value that a method gives, a main result or a step on the way to it. */
@@ -73,12 +75,21 @@ export type Method<Inputs extends InputDefinitions = InputDefinitions> = {
   readonly notes: readonly string[]
   readonly cautions: readonly string[]
   readonly sources: readonly Source[]
+  /** A result with the key of an input that was left empty is what the method proposes for that input. */
   readonly compute: (values: InputValues<Inputs>) => Result<MethodOutcome, MethodError>
+  /**
+   * The results alone, with every proposal already among the values: for the thousands of draws of an interval. May
+   * leave out results that need no interval. Absent where `compute` is quick enough.
+   */
+  readonly computeResults?: (values: InputValues<Inputs>) => readonly ResultValue[]
 }
 
 /** Keeps the exact input types of a definition. */
 export const defineMethod = <const Inputs extends InputDefinitions>(method: Method<Inputs>): Method<Inputs> =>
   method
+
+/** Values without the types of their method, as a run holds them. */
+export type PlainValues = Readonly<Record<string, number>>
 
 /** A refusal that names the inputs it is about. */
 export const noSolution = (message: string, ...fields: readonly string[]): MethodError => ({

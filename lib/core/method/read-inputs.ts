@@ -15,10 +15,11 @@ export function readInputs(
   raw: Readonly<Record<string, RawInput>>,
 ): Result<Readonly<Record<string, number>>, MethodError> {
   const values: Record<string, number> = {}
-  const fields: Record<string, string> = {}
-  for (const key of Object.keys(raw)) {
-    if (!Object.hasOwn(definitions, key)) fields[key] = `This method has no input “${key}”.`
-  }
+  const unknown = Object.keys(raw).filter((key) => !Object.hasOwn(definitions, key))
+  // Built from entries, so that a key such as “__proto__” is a field like any other.
+  const fields: Record<string, string> = Object.fromEntries(
+    unknown.map((key) => [key, `This method has no input “${key}”.`]),
+  )
   for (const [key, definition] of Object.entries(definitions)) {
     const given = Object.hasOwn(raw, key) ? raw[key] : undefined
     if (given === undefined || given === '') {
@@ -40,7 +41,8 @@ function readValue(definition: InputDefinition, given: RawInput): Result<number,
   return problem === null ? parsed : err(problem)
 }
 
-function boundProblem(
+/** What is wrong with a value, as a sentence; null where it is within the bounds of its input. */
+export function boundProblem(
   { label, unit, above, atLeast, atMost }: InputDefinition,
   value: number,
 ): string | null {

@@ -2,8 +2,8 @@ import { minimiseOn } from '../linear/minimise'
 import { magnitude, type Complex } from '../linear/complex'
 import { valueOf, type EdgeResponse } from './edge-response'
 
-/** Enough to find the highest swing of a window; the golden section then finds its crest. */
-const samples = 100
+/** Enough in each window to find the highest swing; the golden section then finds its crest. */
+const samples = 30
 
 /** After so many time constants a mode is gone. */
 const settled = 40
@@ -12,33 +12,34 @@ type Window = readonly [from: number, to: number]
 
 type Extreme = { readonly time: number; readonly value: number }
 
-/** The largest value of a response and when it is reached, in normalised time. */
+/** The largest value of a response that ends at its final value, and when it is reached, in normalised time. */
 export const peakOf = (response: EdgeResponse, poles: readonly Complex[]): Extreme =>
-  maximumIn(windowsOf(response, poles), (time) => valueOf(response, time))
+  maximumIn(aroundEnd(response, poles), (time) => valueOf(response, time))
 
-/** The largest magnitude, for a current that swings both ways. */
-export function peakMagnitudeOf(response: EdgeResponse, poles: readonly Complex[]): number {
-  const windows = windowsOf(response, poles)
-  const upwards = maximumIn(windows, (time) => valueOf(response, time))
-  const downwards = maximumIn(windows, (time) => -valueOf(response, time))
-  return Math.max(upwards.value, downwards.value)
-}
+/** The largest magnitude, for a current that swings both ways and may be largest at the beginning of the edge. */
+export const peakMagnitudeOf = (response: EdgeResponse, poles: readonly Complex[]): number =>
+  maximumIn(everywhere(response, poles), (time) => Math.abs(valueOf(response, time))).value
 
 /**
- * Where the extremes are: within the first cycle of each mode after each corner of the source, since every mode decays
- * from there, and within the last cycle before the end of the edge, where the slope adds to the ring.
+ * Where a rising response peaks: within the first cycle of each mode after the edge, since every mode decays from there,
+ * or within the last cycle before its end, where the slope adds to the ring.
  */
-function windowsOf({ edge }: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
+function aroundEnd({ edge }: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
   const cycles = new Set(poles.map(cycleOf))
   return [...cycles].flatMap((cycle): Window[] =>
     edge === 0
       ? [[0, cycle]]
       : [
-          [0, Math.min(cycle, edge)],
           [Math.max(0, edge - cycle), edge],
           [edge, edge + cycle],
         ],
   )
+}
+
+function everywhere(response: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
+  const { edge } = response
+  const beginnings = edge === 0 ? [] : [...new Set(poles.map(cycleOf))].map((cycle) => Math.min(cycle, edge))
+  return [...beginnings.map((end): Window => [0, end]), ...aroundEnd(response, poles)]
 }
 
 /** A little more than the cycle of an oscillation; seven time constants of what does not oscillate. */
@@ -62,7 +63,7 @@ function maximumIn(windows: readonly Window[], at: (time: number) => number): Ex
     (time) => -at(time),
     Math.max(0, best.time - best.step),
     best.time + best.step,
-    1e-8,
+    1e-7,
   )
   return at(crest) > best.value ? { time: crest, value: at(crest) } : best
 }
@@ -76,7 +77,7 @@ export function riseTimeOf(response: EdgeResponse, poles: readonly Complex[]): n
 function rasterOf(response: EdgeResponse, poles: readonly Complex[]): readonly number[] {
   const slowest = Math.min(...poles.map((pole) => -pole.re))
   const windows: readonly Window[] = [
-    ...windowsOf(response, poles),
+    ...everywhere(response, poles),
     [0, response.edge],
     [response.edge, response.edge + (slowest > 0 ? settled / slowest : 0)],
   ]

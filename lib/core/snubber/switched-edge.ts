@@ -10,7 +10,6 @@ export type Edge = { readonly from: number; readonly step: number; readonly dura
 export type EdgeOutcome = {
   readonly peak: number
   readonly overshoot: number
-  readonly riseTime: number
   readonly dampingRatio: number
   readonly ringFrequency: number | null
   readonly snubberEnergy: number
@@ -19,9 +18,9 @@ export type EdgeOutcome = {
 }
 
 /**
- * The exact response of the switch node to one edge: peak, overshoot as a fraction of the step, 10-90 % rise time, and
- * the energy turned into heat in each resistance. Energies are ∫ i² R dt of the exact currents; together they are
- * ½ (Cs + Cpar) V² for an ideal step and less for a slower edge.
+ * The exact response of the switch node to one edge: peak, overshoot as a fraction of the step, and the energy turned
+ * into heat in each resistance. Energies are ∫ i² R dt of the exact currents; together they are ½ (Cs + Cpar) V² for an
+ * ideal step and less for a slower edge.
  */
 export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
   const omega = angularFrequency(node)
@@ -37,7 +36,6 @@ export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
   return {
     peak: edge.from + edge.step * (1 + overshoot),
     overshoot,
-    riseTime: riseTimeOf(voltage, poles) / omega,
     dampingRatio: leastDamping(node),
     ringFrequency: ringFrequency(node),
     snubberEnergy: node.snubber ? (energyUnit * squareIntegral(snubber) * node.snubber.resistance) / z0 : 0,
@@ -47,6 +45,13 @@ export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
         : (energyUnit * squareIntegral(response(network.sourceCurrent)) * node.seriesResistance) / z0,
     snubberPeakCurrent: node.snubber ? (peakMagnitudeOf(snubber, poles) * Math.abs(edge.step)) / z0 : 0,
   }
+}
+
+/** The time from 10 to 90 % of the step at the switch node, by first crossings, in seconds. */
+export function nodeRiseTime(node: SwitchNode, edge: Edge): number {
+  const omega = angularFrequency(node)
+  const { nodeVoltage, denominator } = normalise(node)
+  return riseTimeOf(edgeResponse(nodeVoltage, denominator, edge.duration * omega), polesOf(node)) / omega
 }
 
 /** The node voltage at the given times (seconds from the beginning of the edge), in volts. */
