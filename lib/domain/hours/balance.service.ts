@@ -1,0 +1,51 @@
+import 'server-only'
+
+import { findCompany } from '@/db/repositories/company.repo'
+import { listBlocks, listLedger } from '@/db/repositories/hour-ledger.repo'
+import { authorize, notFound } from '@/lib/authz/authorize'
+import { balanceOf } from '@/lib/core/ledger/balance'
+import { minutes } from '@/lib/core/ledger/minutes'
+import { err, ok } from '@/lib/core/result'
+
+import { operation } from '../operation'
+import { companyIdSchema } from './hours.schema'
+import { openBlocks, spendableMinutes } from './open-blocks'
+
+/** A company's hours: what can be spent, its blocks, and every movement with the balance after it. */
+export const companyHours = operation('hours.companyHours', companyIdSchema, async (deps, actor, input) => {
+  const allowed = authorize(actor, 'hours.read', { kind: 'company', companyId: input.companyId })
+  if (!allowed.ok) return allowed
+  const company = await findCompany(deps.db, input.companyId)
+  if (!company) return err(notFound)
+  const now = deps.clock.now()
+  const rows = await listBlocks(deps.db, input.companyId)
+  const open = await openBlocks(deps.db, input.companyId)
+  const ledger = await listLedger(deps.db, input.companyId)
+  const totals = ledger.map((_, index) =>
+    balanceOf(ledger.slice(0, index + 1).map((entry) => ({ minutes: minutes(entry.minutes) }))),
+  )
+  return ok({
+    companyName: company.name,
+    balanceMinutes: totals.at(-1) ?? 0,
+    spendableMinutes: spendableMinutes(open, now),
+    blocks: rows.map((row) => ({
+      blockId: row.id,
+      title: row.title,
+      minutes: row.minutes,
+      remaining: open.find((block) => block.id === row.id)?.remaining ?? 0,
+      validUntil: row.valid_until,
+      isExpired: row.valid_until <= now,
+    })),
+    movements: ledger
+      .map((entry, index) => ({
+        entryId: entry.id,
+        at: entry.created_at,
+        kind: entry.kind,
+        text: entry.text,
+        engagement: entry.engagement_title,
+        minutes: entry.minutes,
+        balance: totals[index] ?? 0,
+      }))
+      .reverse(),
+  })
+})
