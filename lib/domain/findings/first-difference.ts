@@ -9,6 +9,7 @@ import type { RunOutcome } from './run-record'
 export function firstDifference(stored: RunOutcome, repeated: RunOutcome): string | null {
   return (
     valueDifference(stored, repeated) ??
+    intervalDifference(stored, repeated) ??
     choiceDifference(stored, repeated) ??
     (isEqual(stored.absence, repeated.absence) ? null : 'The answer in words differs.') ??
     (isEqual(stored.validity, repeated.validity) ? null : 'The checked limits differ.') ??
@@ -27,6 +28,15 @@ function valueDifference(stored: RunOutcome, repeated: RunOutcome): string | nul
     }
   }
   return isEqual(stored.results, repeated.results) ? null : 'The list of results differs.'
+}
+
+function intervalDifference(stored: RunOutcome, repeated: RunOutcome): string | null {
+  for (const [index, interval] of (stored.uncertainty?.intervals ?? []).entries()) {
+    if (isEqual(interval, repeated.uncertainty?.intervals[index])) continue
+    const result = stored.results.find(({ key }) => key === interval.key)
+    return `The interval of ${result?.label ?? interval.key} differs.`
+  }
+  return isEqual(stored.uncertainty, repeated.uncertainty) ? null : 'The intervals differ.'
 }
 
 function choiceDifference(stored: RunOutcome, repeated: RunOutcome): string | null {

@@ -43,6 +43,7 @@ export async function measureTrace(
     choices: [],
     validity: [...measurementChecks(measured.value, facts, base.intervalSeconds)],
     warnings: [...measurementWarnings(measured.value, facts, base.intervalSeconds)],
+    uncertainty: null,
   }
   const figure = ringFigure(measured.value, samples, channel.unit)
   return ok(asStored(outcome, [figure]))

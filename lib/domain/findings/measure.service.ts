@@ -29,7 +29,7 @@ export const measureRing = operation('runs.measureRing', measureRingSchema, asyn
     engagementId: evidence.value.row.engagement_id,
     methodId: ringMeasurementMethod.id,
     methodVersion: ringMeasurementMethod.version,
-    inputs: { trace, values: windowOf(input) },
+    inputs: { trace, values: windowOf(input), tolerances: {} },
     outcome: outcome.value,
     evidence: [{ evidenceId: trace.evidenceId, sha256: trace.sha256 }],
   }

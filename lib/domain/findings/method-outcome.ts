@@ -3,7 +3,7 @@ import type { MethodRun } from '@/lib/core/method/run-method'
 import { asStored, type RunOutcome } from './run-record'
 
 /** What a method gave, in the shape in which runs keep it. */
-export const outcomeOf = ({ outcome }: MethodRun): RunOutcome =>
+export const outcomeOf = ({ outcome, uncertainty }: MethodRun): RunOutcome =>
   asStored(
     {
       absence: null,
@@ -15,6 +15,7 @@ export const outcomeOf = ({ outcome }: MethodRun): RunOutcome =>
       })),
       validity: [...outcome.validity],
       warnings: [],
+      uncertainty: uncertainty && { ...uncertainty, intervals: [...uncertainty.intervals] },
     },
     outcome.figures,
   )

@@ -56,15 +56,15 @@ async function differenceInItself(deps: RepeatDeps, row: RunRow, inputs: RunInpu
   }
   const repeated = inputs.trace
     ? await measureAgain(deps, inputs.trace, inputs.values)
-    : computeAgain(row.method_id, inputs.values)
+    : computeAgain(row.method_id, inputs)
   if (!repeated.ok) return repeated.error
   const stored = { ...parseResult(row.result), figures: parseFigures(row.figures) }
   return firstDifference(stored, repeated.value)
 }
 
-function computeAgain(methodId: string, values: RunInputs['values']): Result<RunOutcome, string> {
+function computeAgain(methodId: string, { values, tolerances }: RunInputs): Result<RunOutcome, string> {
   const raw = Object.fromEntries(Object.entries(values).map(([key, { value }]) => [key, value]))
-  const run = findMethod(methodId)?.run(raw)
+  const run = findMethod(methodId)?.run(raw, tolerances)
   if (!run?.ok) return err(run?.error.message ?? 'The method is not known any more.')
   return ok(outcomeOf(run.value))
 }

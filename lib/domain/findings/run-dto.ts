@@ -4,6 +4,7 @@ import type { RunEvidenceRow, RunListRow, RunRow } from '@/db/repositories/metho
 import type { Figure } from '@/lib/core/figure/figure'
 import type { ChoiceTable, ResultValue, ValidityCheck } from '@/lib/core/method/method'
 import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
+import type { ResultInterval } from '@/lib/core/uncertainty/propagate'
 import type { Unit } from '@/lib/core/units/unit'
 
 import { definitionOf, type MethodDefinition } from './run-definition'
@@ -24,11 +25,16 @@ export type RunInputDto = {
   readonly unit: Unit
   /** In the SI unit. */
   readonly value: number
+  /** As it was stated, such as "5 %"; null where nothing was said. */
+  readonly tolerance: string | null
   /** Where the value comes from, as a sentence without its full stop. */
   readonly origin: string
   /** The run that it was taken from; null for a value that was typed. */
   readonly fromRunId: string | null
 }
+
+/** A result with its 95 % interval, in the SI unit, where tolerances were given. */
+export type RunValueDto = ResultValue & { readonly interval: ResultInterval | null }
 
 /** A run in a list. */
 export type RunHeading = {
@@ -40,7 +46,7 @@ export type RunHeading = {
   readonly createdBy: string
   readonly createdAt: number
   readonly absence: string | null
-  readonly results: readonly ResultValue[]
+  readonly results: readonly RunValueDto[]
 }
 
 /** Everything that a run stores, with what its method says about it. */
@@ -62,7 +68,8 @@ export type RunDto = RunHeading & {
 }
 
 export function runHeadingOf(row: RunListRow): RunHeading {
-  const { absence, results } = parseResult(row.result)
+  const { absence, results, uncertainty } = parseResult(row.result)
+  const intervals = new Map(uncertainty?.intervals.map((interval) => [interval.key, interval]))
   return {
     runId: row.id,
     engagementId: row.engagement_id,
@@ -72,13 +79,13 @@ export function runHeadingOf(row: RunListRow): RunHeading {
     createdBy: row.creator,
     createdAt: row.created_at,
     absence,
-    results,
+    results: results.map((result) => ({ ...result, interval: intervals.get(result.key) ?? null })),
   }
 }
 
 export function runOf(row: RunRow, evidence: readonly RunEvidenceRow[]): RunDto {
   const inputs = parseInputs(row.inputs)
-  const { choices, validity, warnings } = parseResult(row.result)
+  const { results, choices, validity, warnings } = parseResult(row.result)
   const definition = definitionOf(row.method_id)
   const { trace } = inputs
   return {
@@ -90,7 +97,7 @@ export function runOf(row: RunRow, evidence: readonly RunEvidenceRow[]): RunDto 
       evidenceNumber: trace.evidenceNumber,
       evidenceName: trace.evidenceName,
     },
-    inputs: Object.entries(inputs.values).map(([key, value]) => inputOf(key, value, definition, row.creator)),
+    inputs: inputsOf(inputs, results, definition, row.creator),
     choices,
     validity,
     warnings,
@@ -105,18 +112,28 @@ export function runOf(row: RunRow, evidence: readonly RunEvidenceRow[]): RunDto 
 export const runTitleOf = (methodId: string, { trace }: RunInputs): string =>
   trace ? `Ring of ${trace.evidenceName}, ${trace.channel.name}` : definitionOf(methodId).title
 
-function inputOf(key: string, input: InputValue, definition: MethodDefinition, creator: string): RunInputDto {
-  const known = definition.inputs[key]
-  const unit = known?.unit ?? ''
-  return {
+function inputsOf(
+  { values, tolerances }: RunInputs,
+  results: readonly ResultValue[],
+  definition: MethodDefinition,
+  creator: string,
+): RunInputDto[] {
+  const inputOf = (key: string, value: number, origin: string, fromRunId: string | null): RunInputDto => ({
     key,
-    label: known?.label ?? key,
-    symbol: known?.symbol ?? '',
-    unit,
-    value: input.value,
-    origin: originOf(input, unit, creator),
-    fromRunId: input.by === 'run' ? input.runId : null,
-  }
+    label: definition.inputs[key]?.label ?? key,
+    symbol: definition.inputs[key]?.symbol ?? '',
+    unit: definition.inputs[key]?.unit ?? '',
+    value,
+    tolerance: tolerances[key]?.text ?? null,
+    origin,
+    fromRunId,
+  })
+  const given = Object.entries(values).map(([key, input]) => {
+    const origin = originOf(input, definition.inputs[key]?.unit ?? '', creator)
+    return inputOf(key, input.value, origin, input.by === 'run' ? input.runId : null)
+  })
+  const proposed = results.filter(({ key }) => Object.hasOwn(tolerances, key) && !Object.hasOwn(values, key))
+  return [...given, ...proposed.map(({ key, value }) => inputOf(key, value, 'Proposed by the method', null))]
 }
 
 const originOf = (input: InputValue, unit: Unit, creator: string): string =>

@@ -45,10 +45,18 @@ const measuredTrace = z.object({
   facts: captureFacts,
 })
 
+const statedTolerance = z.object({
+  halfWidth: z.number(),
+  distribution: z.enum(['rectangular', 'normal']),
+  text: z.string(),
+})
+
 const runInputs = z.object({
   /** The trace that was measured; null for a run on values alone. */
   trace: measuredTrace.nullable(),
   values: z.record(z.string(), inputValue),
+  /** Of any value, one that the method proposed as well. */
+  tolerances: z.record(z.string(), statedTolerance).default({}),
 })
 
 const resultValue = z.object({
@@ -58,6 +66,20 @@ const resultValue = z.object({
   unit,
   value: z.number(),
   role: z.enum(['main', 'intermediate']),
+})
+
+const uncertainty = z.object({
+  coverage: z.number(),
+  draws: z.int(),
+  seed: z.int(),
+  intervals: z.array(
+    z.object({
+      key: z.string(),
+      low: z.number(),
+      high: z.number(),
+      dominant: z.object({ input: z.string(), share: z.number() }).nullable(),
+    }),
+  ),
 })
 
 const runResult = z.object({
@@ -73,6 +95,8 @@ const runResult = z.object({
   ),
   validity: z.array(z.object({ passed: z.boolean(), sentence: z.string() })),
   warnings: z.array(z.string()),
+  /** The intervals of the results; null where no tolerance was given. */
+  uncertainty: uncertainty.nullable().default(null),
 })
 
 const axis = z.object({

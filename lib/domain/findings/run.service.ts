@@ -4,6 +4,7 @@ import { listRunsOf } from '@/db/repositories/method-run.repo'
 import { withTx } from '@/db/tx'
 import { notFound } from '@/lib/authz/authorize'
 import { findMethod, methods } from '@/lib/core/method/registry'
+import { toleranceField } from '@/lib/core/method/read-tolerances'
 import type { MethodRun } from '@/lib/core/method/run-method'
 import { err, ok } from '@/lib/core/result'
 
@@ -20,31 +21,35 @@ import { storeRun } from './store-run'
 import { takeInputs, type TakenInputs } from './take-inputs'
 
 /** Runs a method on typed values and on results of earlier runs, and keeps inputs, origins and all results. */
-export const runMethod = operation('runs.runMethod', runMethodSchema, async (deps, actor, input) =>
-  withTx(deps.db, async (tx) => {
-    const engagement = await engagementFor(tx, actor, 'run.create', input.engagementId)
-    if (!engagement.ok) return engagement
-    const method = findMethod(input.methodId)
-    if (!method) return err(noSuchMethod)
-    const taken = await takeInputs(tx, input.engagementId, method, input.inputs)
-    if (!taken.ok) {
-      const fields = Object.entries(taken.error).map(([key, sentence]) => [`inputs.${key}.pick`, sentence])
-      return err(inputsRefused(someInputs, Object.fromEntries(fields)))
-    }
-    const run = method.run(taken.value.raw)
-    if (!run.ok) return err(inputsRefused(run.error, fieldsOf(run.error.fields, taken.value)))
-    return ok(
-      await storeRun(tx, deps, actor, {
-        engagementId: input.engagementId,
-        methodId: method.id,
-        methodVersion: method.version,
-        inputs: inputsOf(run.value, taken.value),
-        outcome: outcomeOf(run.value),
-        evidence: taken.value.evidence,
-      }),
+export const runMethod = operation('runs.runMethod', runMethodSchema, async (deps, actor, input) => {
+  const engagement = await engagementFor(deps.db, actor, 'run.create', input.engagementId)
+  if (!engagement.ok) return engagement
+  const method = findMethod(input.methodId)
+  if (!method) return err(noSuchMethod)
+  const taken = await takeInputs(deps.db, input.engagementId, method, input.inputs)
+  if (!taken.ok)
+    return err(
+      inputsRefused(
+        someInputs,
+        inForm(taken.error, () => 'pick'),
+      ),
     )
-  }),
-)
+  const { raw, tolerances, picked, evidence } = taken.value
+  const run = method.run(raw, tolerances)
+  if (!run.ok) {
+    const fields = inForm(run.error.fields, (key) => (picked[key] ? 'pick' : 'text'))
+    return err(inputsRefused(run.error, fields))
+  }
+  const stored = {
+    engagementId: input.engagementId,
+    methodId: method.id,
+    methodVersion: method.version,
+    inputs: inputsOf(run.value, taken.value),
+    outcome: outcomeOf(run.value),
+    evidence,
+  }
+  return ok(await withTx(deps.db, (tx) => storeRun(tx, deps, actor, stored)))
+})
 
 /** The runs of an engagement, newest first, with their results. */
 export const listRuns = operation('runs.list', engagementIdSchema, async (deps, actor, input) => {
@@ -77,24 +82,30 @@ export const getMethod = operation('runs.getMethod', openMethodSchema, async (de
 
 const someInputs = { code: 'invalid_input', message: 'Some inputs need another look.', fields: {} } as const
 
-const inputsOf = (run: MethodRun, { picked, texts }: TakenInputs): RunInputs => ({
+const inputsOf = (run: MethodRun, { picked, texts, tolerances }: TakenInputs): RunInputs => ({
   trace: null,
-  values: Object.fromEntries(
-    Object.entries(run.values).map(([key, value]) => [
-      key,
-      picked[key] ?? { by: 'typed', value, text: texts[key] ?? '' },
-    ]),
+  values: mapValues(
+    run.values,
+    (value, key) => picked[key] ?? { by: 'typed', value, text: texts[key] ?? '' },
   ),
+  tolerances: mapValues(run.tolerances, (tolerance, key) => ({ ...tolerance, text: tolerances[key] ?? '' })),
 })
 
-/** Marks the entry that a refusal is about: the list where the value was picked, else the text. */
-const fieldsOf = (
+/** A method names inputs and, as "tolerances.key", their tolerances; a form has both under "inputs.key". */
+function inForm(
   refused: Readonly<Record<string, string>>,
-  { picked }: TakenInputs,
-): Readonly<Record<string, string>> =>
-  Object.fromEntries(
-    Object.entries(refused).map(([key, sentence]) => [
-      `inputs.${key}.${picked[key] ? 'pick' : 'text'}`,
-      sentence,
-    ]),
-  )
+  entryOf: (key: string) => 'pick' | 'text',
+): Readonly<Record<string, string>> {
+  const prefix = toleranceField('')
+  const named = Object.entries(refused).map(([field, sentence]) => {
+    const key = field.startsWith(prefix) ? field.slice(prefix.length) : field
+    return [`inputs.${key}.${key === field ? entryOf(key) : 'tolerance'}`, sentence]
+  })
+  return Object.fromEntries(named)
+}
+
+const mapValues = <From, To>(
+  record: Readonly<Record<string, From>>,
+  change: (value: From, key: string) => To,
+): Record<string, To> =>
+  Object.fromEntries(Object.entries(record).map(([key, value]) => [key, change(value, key)]))

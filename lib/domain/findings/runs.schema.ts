@@ -18,11 +18,14 @@ export type MeasureRing = z.output<typeof measureRingSchema>
 
 const resultKey = z.string().regex(/^\w{1,40}$/, 'Choose a result from the list.')
 
-const typed = z.strictObject({
-  text: z.string().max(60, 'Shorten this entry.').default(''),
-})
+const entry = z.string().max(60, 'Shorten this entry.').default('')
 
-const picked = z.strictObject({ fromRun: idField, key: resultKey })
+/** How far the value may be off, such as "5 %" or "0.2 pF"; empty means that nothing is said about it. */
+const tolerance = entry
+
+const typed = z.strictObject({ text: entry, tolerance })
+
+const picked = z.strictObject({ fromRun: idField, key: resultKey, tolerance })
 
 /**
  * A form sends what was typed and, beside it, what was picked from a list as "run:result". What was picked counts, and
@@ -33,7 +36,8 @@ const fromForm = (value: unknown): unknown => {
   const { pick, ...rest } = value
   if (pick === '' || pick === undefined) return rest
   const [fromRun, key] = String(pick).split(':')
-  return { fromRun, key }
+  const { text: _text, ...others } = { text: '', ...rest }
+  return { ...others, fromRun, key }
 }
 
 export const runMethodSchema = z.strictObject({

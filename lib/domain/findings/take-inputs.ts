@@ -1,6 +1,6 @@
 import 'server-only'
 
-import type { Tx } from '@/db/client'
+import type { Db } from '@/db/client'
 import { findRun, listRunEvidence } from '@/db/repositories/method-run.repo'
 import { ok, type Result } from '@/lib/core/result'
 import type { RegisteredMethod } from '@/lib/core/method/registry'
@@ -17,6 +17,7 @@ type Picked = Extract<InputValue, { by: 'run' }>
 export type TakenInputs = {
   readonly raw: Readonly<Record<string, RawInput>>
   readonly texts: Readonly<Record<string, string>>
+  readonly tolerances: Readonly<Record<string, string>>
   readonly picked: Readonly<Record<string, Picked>>
   readonly evidence: readonly RunEvidence[]
 }
@@ -26,36 +27,38 @@ export type TakenInputs = {
  * A run of another engagement is refused exactly as one that does not exist.
  */
 export async function takeInputs(
-  tx: Tx,
+  db: Db,
   engagementId: string,
   method: RegisteredMethod,
   given: Readonly<Record<string, GivenInput>>,
 ): Promise<Result<TakenInputs, Readonly<Record<string, string>>>> {
   const raw: Record<string, RawInput> = {}
   const texts: Record<string, string> = {}
+  const tolerances: Record<string, string> = {}
   const picked: Record<string, Picked> = {}
   const refused: Record<string, string> = {}
   for (const [key, input] of Object.entries(given)) {
+    if (input.tolerance.trim() !== '') tolerances[key] = input.tolerance.trim()
     if ('text' in input) {
       raw[key] = texts[key] = input.text.trim()
       continue
     }
-    const found = await pickedValue(tx, engagementId, input, method.inputs[key]?.unit)
+    const found = await pickedValue(db, engagementId, input, method.inputs[key]?.unit)
     if (typeof found === 'string') refused[key] = found
     else raw[key] = (picked[key] = found).value
   }
   if (Object.keys(refused).length > 0) return { ok: false, error: refused }
   const runIds = [...new Set(Object.values(picked).map((value) => value.runId))]
-  return ok({ raw, texts, picked, evidence: await evidenceOf(tx, runIds) })
+  return ok({ raw, texts, tolerances, picked, evidence: await evidenceOf(db, runIds) })
 }
 
 async function pickedValue(
-  tx: Tx,
+  db: Db,
   engagementId: string,
   { fromRun, key }: Extract<GivenInput, { fromRun: string }>,
   unit: string | undefined,
 ): Promise<Picked | string> {
-  const run = await findRun(tx, fromRun)
+  const run = await findRun(db, fromRun)
   if (!run || run.engagement_id !== engagementId)
     return 'This run is not one of this engagement. Choose another.'
   const result = parseResult(run.result).results.find((candidate) => candidate.key === key)
@@ -76,8 +79,8 @@ async function pickedValue(
 }
 
 /** Each piece of evidence once. */
-async function evidenceOf(tx: Tx, runIds: readonly string[]): Promise<readonly RunEvidence[]> {
-  const rows = await listRunEvidence(tx, runIds)
+async function evidenceOf(db: Db, runIds: readonly string[]): Promise<readonly RunEvidence[]> {
+  const rows = await listRunEvidence(db, runIds)
   const byId = new Map(rows.map(({ evidence_id, sha256 }) => [evidence_id, sha256]))
   return [...byId].map(([evidenceId, sha256]) => ({ evidenceId, sha256 }))
 }
