@@ -1,0 +1,67 @@
+import { describe, expect, it } from 'vitest'
+
+import { findMethod } from '@/lib/core/method/registry'
+import { decrementOf, naturalFrequency } from '@/lib/core/snubber/parasitics'
+
+import { expectWithin, input, referenceCases } from './reference-cases'
+
+const file = './snubber-cases.json'
+
+function resultsOf(id: string, raw: Readonly<Record<string, number>>) {
+  const run = findMethod(id)?.run(raw)
+  if (!run?.ok) return null
+  const results = run.value.outcome.results
+  return (key: string) => results.find((result) => result.key === key)?.value ?? NaN
+}
+
+// Source: the closed form in 40-digit arithmetic, and a search for L and C whose roots give back both frequencies.
+describe('parasitics from two ring frequencies', () => {
+  it.each(referenceCases(file, 'snubber.parasitics_two_freq'))('$id: $how_computed', (item) => {
+    const raw = { f0: input(item, 'f0'), f1: input(item, 'f1'), cAdd: input(item, 'c_add') }
+    const result = resultsOf('ring-parasitics', raw)
+    if (item.expect_error) {
+      expect(result).toBeNull()
+      return
+    }
+    expectWithin(item, {
+      c_par: result?.('cPar') ?? NaN,
+      l_par: result?.('lPar') ?? NaN,
+      z0: result?.('z0') ?? NaN,
+    })
+  })
+
+  it.each(referenceCases(file, 'snubber.parasitics_two_freq_damped'))('$id: $how_computed', (item) => {
+    const result = resultsOf('ring-parasitics', {
+      f0: input(item, 'f0_damped'),
+      zeta0: input(item, 'zeta0'),
+      f1: input(item, 'f1_damped'),
+      zeta1: input(item, 'zeta1'),
+      cAdd: input(item, 'c_add'),
+    })
+    expectWithin(item, {
+      f0_undamped: result?.('f0Natural') ?? NaN,
+      f1_undamped: result?.('f1Natural') ?? NaN,
+      c_par: result?.('cPar') ?? NaN,
+      l_par: result?.('lPar') ?? NaN,
+      z0: result?.('z0') ?? NaN,
+    })
+  })
+})
+
+// Source: textbook theory of the damped oscillator, in 40-digit arithmetic.
+describe('damping from two peaks', () => {
+  it.each(referenceCases(file, 'snubber.log_decrement'))('$id: $how_computed', (item) => {
+    const found = decrementOf(input(item, 'first_peak'), input(item, 'later_peak'), input(item, 'cycles'))
+    if (!found.ok) throw new Error('A decrement was expected')
+    expectWithin(item, {
+      log_decrement: found.value.logarithmicDecrement,
+      damping_ratio: found.value.dampingRatio,
+      q_factor: found.value.qualityFactor,
+      f_natural: naturalFrequency(input(item, 'f_damped'), found.value.dampingRatio),
+    })
+  })
+
+  it('refuses an amplitude that grows', () => {
+    expect(decrementOf(1, 1.2, 3).ok).toBe(false)
+  })
+})
