@@ -11,3 +11,14 @@ export async function postedMinutesOf(db: Db | Tx, engagementId: string): Promis
     .executeTakeFirst()
   return row?.minutes ?? 0
 }
+
+/** All minutes that were posted to the engagements of a company. */
+export async function postedMinutesOfCompany(db: Db, companyId: string): Promise<number> {
+  const row = await db
+    .selectFrom('time_entry')
+    .innerJoin('engagement', 'engagement.id', 'time_entry.engagement_id')
+    .where('engagement.company_id', '=', companyId)
+    .select((select) => select.fn.sum<number>('time_entry.posted_minutes').as('minutes'))
+    .executeTakeFirst()
+  return row?.minutes ?? 0
+}

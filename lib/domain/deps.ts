@@ -4,6 +4,7 @@ import type { Clock } from '@/lib/ports/clock'
 import type { FileStore } from '@/lib/ports/file-store'
 import type { Ids } from '@/lib/ports/ids'
 import type { PasswordHasher } from '@/lib/ports/password-hasher'
+import type { Payments } from '@/lib/ports/payments'
 import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
 
 /** Where a request came from, as far as it is known. */
@@ -31,6 +32,7 @@ export type Deps = {
   readonly files: FileStore
   readonly captures: CaptureAnalyser
   readonly passwords: PasswordHasher
+  readonly payments: Payments
   readonly pdf: PdfRenderer
   readonly settings: PracticeSettings
   readonly request: RequestInfo

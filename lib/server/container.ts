@@ -8,9 +8,12 @@ import { createArgon2Hasher } from '@/lib/adapters/argon2/argon2-hasher'
 import { createCaptureWorker } from '@/lib/adapters/capture-worker/capture-worker'
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { createPdfWorker } from '@/lib/adapters/pdf-worker/pdf-worker'
+import { createResendMailer } from '@/lib/adapters/resend/resend-mailer'
+import { createStripePayments } from '@/lib/adapters/stripe/stripe-payments'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import { systemClock } from '@/lib/adapters/system-clock/system-clock'
 import type { Deps } from '@/lib/domain/deps'
+import type { Mailer } from '@/lib/ports/mailer'
 
 import { parseEnv, type Env } from './env'
 import { createLog } from './log'
@@ -20,6 +23,7 @@ export type Container = {
   readonly env: Env
   readonly log: Logger
   readonly deps: Omit<Deps, 'request'>
+  readonly mailer: Mailer
 }
 
 function createContainer(): Container {
@@ -29,6 +33,7 @@ function createContainer(): Container {
   return {
     env,
     log: createLog(env.logLevel),
+    mailer: createResendMailer(env.resend),
     deps: {
       db: openDatabase(env.databaseFile),
       clock: systemClock,
@@ -36,6 +41,7 @@ function createContainer(): Container {
       files,
       captures: createCaptureWorker(files),
       passwords: createArgon2Hasher(),
+      payments: createStripePayments(env.stripe),
       pdf: createPdfWorker(),
       settings: {
         practiceName: env.practice.name,

@@ -6,6 +6,7 @@ import { openDatabase, type Db } from '@/db/client'
 import { migrate } from '@/db/migrate'
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
+import { createStripePayments } from '@/lib/adapters/stripe/stripe-payments'
 import type { Deps } from '@/lib/domain/deps'
 
 import { createInlineCaptureAnalyser } from './inline-capture-analyser'
@@ -24,6 +25,11 @@ export type TestPortal = {
 }
 
 export const testStart = Date.UTC(2026, 11, 1, 9, 0, 0)
+
+export const testWebhookSecret = 'whsec_secret_of_the_test'
+
+/** Nothing listens here: a test that pays hands in an adapter that points to the payments stand-in. */
+const unreachable = 'http://127.0.0.1:9'
 
 /** A portal without its pages: a migrated database file and a file store of its own in a new folder. */
 export async function openTestPortal(): Promise<TestPortal> {
@@ -45,6 +51,12 @@ export async function openTestPortal(): Promise<TestPortal> {
     files,
     captures: createInlineCaptureAnalyser(files),
     passwords: createQuickHasher(),
+    payments: createStripePayments({
+      secretKey: 'sk_test_of_the_test',
+      webhookSecret: testWebhookSecret,
+      apiBase: new URL(unreachable),
+      retries: 0,
+    }),
     pdf: createInlinePdfRenderer(),
     settings: {
       practiceName: 'Tarn Hollow EMC',
