@@ -53,6 +53,15 @@ function exponentOf(suffix: string, unit: Unit): number | null {
   return null
 }
 
+/** Whether a suffix is a unit with or without a prefix, but not a prefix alone. */
+function endsInUnit(suffix: string, unit: Unit): boolean {
+  if (isSpellingOf(suffix, unit)) return true
+  if (!unitFacts(unit).takesPrefix) return false
+  return Object.keys(prefixExponents).some(
+    (prefix) => suffix.startsWith(prefix) && isSpellingOf(suffix.slice(prefix.length), unit),
+  )
+}
+
 const isSpellingOf = (text: string, unit: Unit): boolean =>
   text !== '' && (text === unit.normalize('NFKC') || unitFacts(unit).spellings.includes(text))
 
@@ -63,7 +72,8 @@ function finite(mantissa: string, exponent: number, unit: Unit): Result<number, 
 }
 
 function wrongUnit(text: string, unit: Unit): QuantityError {
-  const other = units.find((candidate) => candidate !== unit && candidate !== '' && text.endsWith(candidate))
+  const suffix = plainForm.exec(text)?.[4] ?? ''
+  const other = units.find((candidate) => candidate !== unit && endsInUnit(suffix, candidate))
   const found = other ? `“${text}” is ${unitFacts(other).quantity}` : `“${text}” has an unknown unit`
   return failure('wrong_unit', unit, found)
 }
