@@ -11,7 +11,7 @@ export type FormattedQuantity = { readonly number: string; readonly unit: string
 export function formatQuantity(value: number, unit: Unit, significant = 4): FormattedQuantity {
   if (!Number.isFinite(value)) return { number: '—', unit }
   if (value === 0) return { number: '0', unit }
-  if (!unitFacts(unit).takesPrefix) return { number: withMinus(plainDigits(value, significant)), unit }
+  if (!unitFacts(unit).takesPrefix) return inMultiple(value, unit, significant)
   const rounded = Number(value.toPrecision(significant))
   const exponent = clampExponent(Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3)
   const scaled = Number(`${rounded.toPrecision(significant)}`) / 10 ** exponent
@@ -25,6 +25,16 @@ export function formatQuantity(value: number, unit: Unit, significant = 4): Form
 export function quantityText(value: number, unit: Unit, significant = 4): string {
   const formatted = formatQuantity(value, unit, significant)
   return formatted.unit === '' ? formatted.number : `${formatted.number}\u00a0${formatted.unit}`
+}
+
+/** In the largest multiple that keeps the value at 1 or above: 4e-4 m² becomes "4.000" "cm²". */
+function inMultiple(value: number, unit: Unit, significant: number): FormattedQuantity {
+  const rounded = Number(value.toPrecision(significant))
+  const multiples = Object.entries({ ...unitFacts(unit).multiples, [unit]: 0 }).sort((a, b) => b[1] - a[1])
+  const [symbol, exponent] = multiples.find(([, power]) => Math.abs(rounded) >= 10 ** power) ??
+    multiples.at(-1) ?? [unit, 0]
+  const scaled = exponent === 0 ? value : Number(`${rounded.toPrecision(significant)}`) / 10 ** exponent
+  return { number: withMinus(plainDigits(scaled, significant)), unit: symbol }
 }
 
 function clampExponent(exponent: number): number {

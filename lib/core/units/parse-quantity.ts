@@ -21,29 +21,35 @@ const infixForm = /^([+-]?)(\d+)([afpnu\u00b5\u03bcmkKMGTR])(\d+)\s*(.*)$/u
  * Errors: `empty`, `not_a_number`, `wrong_unit` (names the unit that is expected), `out_of_range` (not a finite double).
  */
 export function parseQuantity(text: string, unit: Unit): Result<number, QuantityError> {
-  const trimmed = text.normalize('NFKC').replaceAll('\u2212', '-').trim()
+  const given = text.trim()
+  const trimmed = normalised(given)
   if (trimmed === '') return err(failure('empty', unit, `Enter ${unitFacts(unit).quantity}`))
   const infix = infixForm.exec(trimmed)
   if (infix) {
     const [, sign = '', whole = '', mark = '', fraction = '', rest = ''] = infix
-    if (mark === 'R' && unit !== 'Ω') return err(wrongUnit(trimmed, unit))
+    if (mark === 'R' && unit !== 'Ω') return err(wrongUnit(given, unit))
     const exponent = mark === 'R' ? 0 : (prefixExponents[mark] ?? 0)
-    if (exponent !== 0 && !unitFacts(unit).takesPrefix) return err(wrongUnit(trimmed, unit))
+    if (exponent !== 0 && !unitFacts(unit).takesPrefix) return err(wrongUnit(given, unit))
     return isSpellingOf(rest, unit) || rest === ''
       ? finite(`${sign}${whole}.${fraction}`, exponent, unit)
-      : err(wrongUnit(trimmed, unit))
+      : err(wrongUnit(given, unit))
   }
   const plain = plainForm.exec(trimmed)
-  if (!plain) return err(failure('not_a_number', unit, `“${trimmed}” is not a number`))
+  if (!plain) return err(failure('not_a_number', unit, `“${given}” is not a number`))
   const [, sign = '', digits = '', power = '0', suffix = ''] = plain
   const exponent = exponentOf(suffix, unit)
-  if (exponent === null) return err(wrongUnit(trimmed, unit))
+  if (exponent === null) return err(wrongUnit(given, unit))
   return finite(`${sign}${digits.replace(',', '.')}`, exponent + Number(power), unit)
 }
+
+/** One spelling of what looks alike: µ, Ω, ² and the minus each have several code points. */
+const normalised = (text: string): string => text.normalize('NFKC').replaceAll('\u2212', '-').trim()
 
 /** The power of ten of a suffix such as "", "n", "nF" or "F"; null when it belongs to another unit. */
 function exponentOf(suffix: string, unit: Unit): number | null {
   if (suffix === '' || isSpellingOf(suffix, unit)) return 0
+  const multiple = multipleOf(suffix, unit)
+  if (multiple !== undefined) return multiple
   if (!unitFacts(unit).takesPrefix) return null
   for (const [prefix, exponent] of Object.entries(prefixExponents)) {
     if (prefix === '' || !suffix.startsWith(prefix)) continue
@@ -55,7 +61,7 @@ function exponentOf(suffix: string, unit: Unit): number | null {
 
 /** Whether a suffix is a unit with or without a prefix, but not a prefix alone. */
 function endsInUnit(suffix: string, unit: Unit): boolean {
-  if (isSpellingOf(suffix, unit)) return true
+  if (isSpellingOf(suffix, unit) || multipleOf(suffix, unit) !== undefined) return true
   if (!unitFacts(unit).takesPrefix) return false
   return Object.keys(prefixExponents).some(
     (prefix) => suffix.startsWith(prefix) && isSpellingOf(suffix.slice(prefix.length), unit),
@@ -65,6 +71,11 @@ function endsInUnit(suffix: string, unit: Unit): boolean {
 const isSpellingOf = (text: string, unit: Unit): boolean =>
   text !== '' && (text === unit.normalize('NFKC') || unitFacts(unit).spellings.includes(text))
 
+function multipleOf(suffix: string, unit: Unit): number | undefined {
+  const multiples = Object.entries(unitFacts(unit).multiples ?? {})
+  return multiples.find(([symbol]) => symbol.normalize('NFKC') === suffix)?.[1]
+}
+
 function finite(mantissa: string, exponent: number, unit: Unit): Result<number, QuantityError> {
   const value = Number(`${mantissa}e${exponent}`)
   if (Number.isFinite(value)) return ok(value)
@@ -72,7 +83,7 @@ function finite(mantissa: string, exponent: number, unit: Unit): Result<number, 
 }
 
 function wrongUnit(text: string, unit: Unit): QuantityError {
-  const suffix = plainForm.exec(text)?.[4] ?? ''
+  const suffix = plainForm.exec(normalised(text))?.[4] ?? ''
   const other = units.find((candidate) => candidate !== unit && endsInUnit(suffix, candidate))
   const found = other ? `“${text}” is ${unitFacts(other).quantity}` : `“${text}” has an unknown unit`
   return failure('wrong_unit', unit, found)

@@ -1,5 +1,26 @@
 /** A unit as it is stored and shown; every value in the core is in one of these, without a prefix. */
-export const units = ['Hz', 's', 'H', 'F', 'Ω', 'V', 'A', 'W', 'J', 'm', 'm²', '%', 'ppm', 'dB', ''] as const
+export const units = [
+  'Hz',
+  's',
+  'H',
+  'F',
+  'Ω',
+  'V',
+  'A',
+  'W',
+  'J',
+  'm',
+  'm²',
+  'V/m',
+  'S/m',
+  'H/m',
+  '%',
+  'ppm',
+  'dB',
+  'dBµV',
+  'dBµV/m',
+  '',
+] as const
 
 export type Unit = (typeof units)[number]
 
@@ -8,6 +29,8 @@ type UnitFacts = {
   readonly takesPrefix: boolean
   /** Other spellings that people and instruments write. */
   readonly spellings: readonly string[]
+  /** Multiples that are no prefixed units, as powers of ten: areas. The largest that keeps a value at 1 or above is shown. */
+  readonly multiples?: Readonly<Record<string, number>>
   readonly example: string
 }
 
@@ -27,10 +50,21 @@ const facts: Readonly<Record<Unit, UnitFacts>> = {
   W: { quantity: 'a power', takesPrefix: true, spellings: [], example: '0.25 or 90 mW' },
   J: { quantity: 'an energy', takesPrefix: true, spellings: [], example: '1.2 µJ' },
   m: { quantity: 'a length', takesPrefix: true, spellings: [], example: '12 mm' },
-  'm²': { quantity: 'an area', takesPrefix: false, spellings: ['m2'], example: '1e-4' },
+  'm²': {
+    quantity: 'an area',
+    takesPrefix: false,
+    spellings: ['m2'],
+    multiples: { 'mm²': -6, 'cm²': -4 },
+    example: '4 cm² or 25 mm²',
+  },
+  'V/m': { quantity: 'a field strength', takesPrefix: true, spellings: [], example: '100 µV/m' },
+  'S/m': { quantity: 'a conductivity', takesPrefix: true, spellings: [], example: '58 MS/m' },
+  'H/m': { quantity: 'an inductance per length', takesPrefix: true, spellings: [], example: '250 nH/m' },
   '%': { quantity: 'a percentage', takesPrefix: false, spellings: [], example: '5 %' },
   ppm: { quantity: 'a tolerance in ppm', takesPrefix: false, spellings: [], example: '50 ppm' },
   dB: { quantity: 'a level difference', takesPrefix: false, spellings: [], example: '6 dB' },
+  dBµV: { quantity: 'a level', takesPrefix: false, spellings: ['dBuV'], example: '56 dBµV' },
+  'dBµV/m': { quantity: 'a field level', takesPrefix: false, spellings: ['dBuV/m'], example: '40 dBµV/m' },
   '': { quantity: 'a plain number', takesPrefix: false, spellings: [], example: '0.5' },
 }
 
