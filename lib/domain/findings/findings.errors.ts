@@ -31,6 +31,6 @@ export const noApprovedScope: FindingError = {
 
 export const notComplete = (fields: Readonly<Record<string, string>>): FindingError => ({
   code: 'not_complete',
-  message: `The draft is not complete. ${Object.values(fields).join(' ')}`,
+  message: 'The draft is not complete yet. Edit it first:',
   fields,
 })

@@ -1,0 +1,72 @@
+'use client'
+
+import { useState } from 'react'
+
+import type { FormAction } from '@/lib/core/action-state'
+
+import { ActionForm } from '../forms/action-form'
+import { FormQuantity, FormSelect } from '../forms/form-fields'
+
+export type OfferedCapture = {
+  readonly evidenceId: string
+  readonly number: number
+  readonly name: string
+  readonly channels: readonly { readonly position: number; readonly name: string; readonly unit: string }[]
+}
+
+type MeasureFormProps = {
+  readonly captures: readonly OfferedCapture[]
+  readonly chosenId?: string | undefined
+  readonly action: FormAction
+}
+
+/** A capture, one of its channels, and the part of the record that holds the edge. */
+export const MeasureForm = ({ captures, chosenId, action }: MeasureFormProps) => {
+  const first = captures.find((capture) => capture.evidenceId === chosenId) ?? captures[0]
+  const [evidenceId, choose] = useState(first?.evidenceId ?? '')
+  const capture = captures.find((candidate) => candidate.evidenceId === evidenceId)
+  return (
+    <ActionForm
+      action={action}
+      submitLabel="Measure"
+      pendingLabel="Measuring…"
+      label="Measure the ring of a capture"
+    >
+      <div className="grid items-end gap-x-6 gap-y-4 sm:grid-cols-2">
+        <FormSelect
+          name="evidenceId"
+          label="Capture"
+          value={evidenceId}
+          onChange={(event) => choose(event.currentTarget.value)}
+          options={captures.map(({ evidenceId: value, number, name }) => ({
+            value,
+            label: `${number}. ${name}`,
+          }))}
+        />
+        <FormSelect
+          key={evidenceId}
+          name="channel"
+          label="Channel"
+          options={(capture?.channels ?? []).map(({ position, name, unit }) => ({
+            value: position.toString(),
+            label: unit === '' ? name : `${name} (${unit})`,
+          }))}
+        />
+        <FormQuantity
+          name="from"
+          label="From"
+          unit="s"
+          optional
+          hint="Just before the edge, such as −50n; the start of the record if empty."
+        />
+        <FormQuantity
+          name="to"
+          label="To"
+          unit="s"
+          optional
+          hint="Just before the next edge; the end of the record if empty."
+        />
+      </div>
+    </ActionForm>
+  )
+}

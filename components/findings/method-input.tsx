@@ -1,0 +1,75 @@
+'use client'
+
+import { useState } from 'react'
+
+import type { InputDefinition } from '@/lib/core/method/method'
+
+import { FormQuantity, FormSelect, FormText } from '../forms/form-fields'
+import { SymbolText } from './symbol-text'
+
+export type OfferedResult = {
+  /** "run:result", as the form sends it. */
+  readonly value: string
+  /** "Run 1 · Ring of o01_bare.csv, SW · f_d = 102.7 MHz". */
+  readonly label: string
+  /** The value alone, to be shown in the entry. */
+  readonly written: string
+}
+
+type MethodInputProps = {
+  readonly inputKey: string
+  readonly definition: InputDefinition
+  readonly offered: readonly OfferedResult[]
+  readonly initialPick?: string | undefined
+}
+
+/** One input: typed, or taken from a stored run; then the entry shows that value and is not sent. */
+export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }: MethodInputProps) => {
+  const [text, type] = useState('')
+  const [pick, choose] = useState(initialPick)
+  const picked = offered.find((result) => result.value === pick)
+  const name = (part: string) => `inputs.${inputKey}.${part}`
+  return (
+    <div
+      role="group"
+      aria-label={definition.label}
+      className="grid items-end gap-x-4 gap-y-3 border-b border-rule pb-4 lg:grid-cols-[minmax(0,5fr)_minmax(0,2fr)_minmax(0,5fr)]"
+    >
+      <FormQuantity
+        name={name('text')}
+        label={
+          <>
+            {definition.label} <SymbolText symbol={definition.symbol} />
+          </>
+        }
+        hint={definition.help}
+        unit={picked ? '' : definition.unit}
+        optional={!definition.isRequired}
+        disabled={picked !== undefined}
+        value={picked ? picked.written : text}
+        onChange={(event) => type(event.currentTarget.value)}
+      />
+      <FormText
+        name={name('tolerance')}
+        label="±"
+        aria-label={`Tolerance of ${definition.label}`}
+        placeholder={definition.usualTolerance ?? '5 %'}
+        autoComplete="off"
+        className="num text-right"
+      />
+      {offered.length > 0 ? (
+        <FormSelect
+          name={name('pick')}
+          label="Take from"
+          aria-label={`Take ${definition.label} from`}
+          placeholder="Typed at the left"
+          options={offered}
+          value={pick}
+          onChange={(event) => choose(event.currentTarget.value)}
+        />
+      ) : (
+        <p className="self-end pb-2 text-sm text-ink-faint">No run gives one yet.</p>
+      )}
+    </div>
+  )
+}
