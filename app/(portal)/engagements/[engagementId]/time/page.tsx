@@ -1,0 +1,47 @@
+import type { Metadata } from 'next'
+
+import { DraftList } from '@/components/hours/draft-list'
+import { ManualEntryForm } from '@/components/hours/manual-entry-form'
+import { PostedTable } from '@/components/hours/posted-table'
+import { RoomLeft } from '@/components/hours/room-left'
+import { TimerForm } from '@/components/hours/timer-form'
+import { PageBody } from '@/components/shell/page-body'
+import { EmptyState } from '@/components/ui/empty-state'
+import { Sheet } from '@/components/ui/sheet'
+import { posting } from '@/lib/server/operations'
+import { query } from '@/lib/server/query'
+
+import { addTime, discardTime, postTime, startTimer } from './actions'
+
+export const metadata: Metadata = { title: 'Time' }
+
+export default async function TimePage({ params }: PageProps<'/engagements/[engagementId]/time'>) {
+  const { engagementId } = await params
+  const time = await query(posting.engagementTime, { engagementId })
+  return (
+    <PageBody
+      aside={
+        <>
+          <RoomLeft {...time} />
+          {time.mayTrack ? <TimerForm engagementId={engagementId} start={startTimer} /> : null}
+        </>
+      }
+    >
+      {time.mayTrack ? (
+        <>
+          <DraftList drafts={time.drafts} post={postTime} discard={discardTime} />
+          <ManualEntryForm engagementId={engagementId} add={addTime} />
+        </>
+      ) : null}
+      {time.posted.length === 0 ? (
+        <EmptyState title="No time posted yet">
+          Consultants post their time here, each entry with what was done.
+        </EmptyState>
+      ) : (
+        <Sheet title="Posted time" flush>
+          <PostedTable posted={time.posted} />
+        </Sheet>
+      )}
+    </PageBody>
+  )
+}

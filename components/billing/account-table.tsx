@@ -1,0 +1,56 @@
+import { DataTable } from '../ui/data-table'
+import { Minutes } from '../ui/minutes'
+import { TextLink } from '../ui/text-link'
+import { AgreementList } from './agreement-list'
+
+export type Account = {
+  readonly companyId: string
+  readonly companyName: string
+  readonly creditedMinutes: number
+  readonly debitedMinutes: number
+  readonly balanceMinutes: number
+  readonly agreements: readonly { readonly agrees: boolean; readonly sentence: string }[]
+}
+
+/** Credits, debits and balance of every company. */
+export const AccountTable = ({ accounts }: { readonly accounts: readonly Account[] }) => (
+  <DataTable
+    caption="Hours of the clients"
+    captionHidden
+    rows={accounts}
+    rowKey={(account) => account.companyId}
+    columns={[
+      {
+        key: 'company',
+        header: 'Client',
+        isRowHeader: true,
+        cell: (account) => (
+          <TextLink href={`/companies/${account.companyId}/hours`}>{account.companyName}</TextLink>
+        ),
+      },
+      {
+        key: 'credit',
+        header: 'Credited',
+        align: 'end',
+        cell: (account) => <Minutes minutes={account.creditedMinutes} />,
+      },
+      {
+        key: 'debit',
+        header: 'Debited',
+        align: 'end',
+        cell: (account) => <Minutes minutes={account.debitedMinutes} />,
+      },
+      {
+        key: 'balance',
+        header: 'Balance',
+        align: 'end',
+        cell: (account) => <Minutes minutes={account.balanceMinutes} />,
+      },
+      {
+        key: 'agree',
+        header: 'Agreement',
+        cell: (account) => <AgreementList agreements={account.agreements} />,
+      },
+    ]}
+  />
+)
