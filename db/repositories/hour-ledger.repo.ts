@@ -1,5 +1,5 @@
 import 'server-only'
-import type { Insertable, Selectable } from 'kysely'
+import { sql, type Insertable, type Selectable } from 'kysely'
 
 import type { Db, Tx } from '@/db/client'
 import type { HourBlockTable, HourLedgerEntryTable } from '@/db/tables/hours'
@@ -27,14 +27,14 @@ export function listBlocks(db: Db | Tx, companyId: string): Promise<BlockRow[]> 
 
 export type LedgerLine = LedgerRow & { readonly engagement_title: string | null }
 
-/** Every entry of a company, oldest first, with the engagement that a debit belongs to. */
+/** Every entry of a company in the order of writing, with the engagement that a debit belongs to. */
 export function listLedger(db: Db | Tx, companyId: string): Promise<LedgerLine[]> {
   return db
     .selectFrom('hour_ledger_entry')
     .leftJoin('engagement', 'engagement.id', 'hour_ledger_entry.engagement_id')
     .where('hour_ledger_entry.company_id', '=', companyId)
     .orderBy('hour_ledger_entry.created_at')
-    .orderBy('hour_ledger_entry.id')
+    .orderBy(sql`hour_ledger_entry.rowid`)
     .selectAll('hour_ledger_entry')
     .select('engagement.title as engagement_title')
     .execute()

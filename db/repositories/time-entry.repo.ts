@@ -33,6 +33,34 @@ export function findTimeEntry(db: Db | Tx, timeEntryId: string): Promise<TimeEnt
   return db.selectFrom('time_entry').selectAll().where('id', '=', timeEntryId).executeTakeFirst()
 }
 
+export type TimeSpan = { readonly personId: string; readonly from: number; readonly to: number }
+
+/** Another entry of the person that shares time with the span [from, to), in UTC milliseconds; the earliest one. */
+export function findOverlap(
+  tx: Tx,
+  span: TimeSpan,
+  among: { readonly exceptId?: string; readonly postedOnly?: boolean } = {},
+): Promise<(TimeEntryRow & { engagement_title: string }) | undefined> {
+  return tx
+    .selectFrom('time_entry')
+    .innerJoin('engagement', 'engagement.id', 'time_entry.engagement_id')
+    .where('person_id', '=', span.personId)
+    .where('started_at', '<', span.to)
+    .where((where) =>
+      where(
+        where('worked_seconds', '*', 1000),
+        '>',
+        where(where.val(span.from), '-', where.ref('started_at')),
+      ),
+    )
+    .$if(among.exceptId !== undefined, (query) => query.where('time_entry.id', '<>', among.exceptId ?? ''))
+    .$if(among.postedOnly === true, (query) => query.where('posted_at', 'is not', null))
+    .orderBy('started_at')
+    .selectAll('time_entry')
+    .select('engagement.title as engagement_title')
+    .executeTakeFirst()
+}
+
 export async function updateTimeEntry(
   tx: Tx,
   timeEntryId: string,

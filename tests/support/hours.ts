@@ -4,7 +4,7 @@ import { creditBlock, type NewBlock } from '@/lib/domain/hours/credit-block'
 import { addTime } from '@/lib/domain/hours/time-draft.service'
 
 import type { TestEngagement } from './engagement'
-import type { TestPortal } from './test-portal'
+import { testStart, type TestPortal } from './test-portal'
 import { valueOf } from './value-of'
 
 export const dayLength = 24 * 60 * 60_000
@@ -35,7 +35,7 @@ const isoMinute = (instant: number): string => new Date(instant).toISOString().s
 
 /**
  * A draft of the given length by the consultant of the engagement. Drafts of one test lie apart, on days of their own
- * before the test's now, because one person cannot work twice at once.
+ * before the start of the test, because one person cannot work twice at once.
  */
 export async function draftTime(
   portal: TestPortal,
@@ -47,7 +47,7 @@ export async function draftTime(
     engagementId: engagement.engagementId,
     workKind: 'analysis',
     text: 'Fitted the ring',
-    startedAt: isoMinute(portal.clock.now() - daysAgo * dayLength),
+    startedAt: isoMinute(testStart - daysAgo * dayLength),
     workedMinutes: String(workedMinutes),
   })
   return valueOf(added).timeEntryId

@@ -1,7 +1,8 @@
 import 'server-only'
 
 import { findCompany } from '@/db/repositories/company.repo'
-import { listBlocks, listLedger } from '@/db/repositories/hour-ledger.repo'
+import { listBlocks, listLedger, type LedgerLine } from '@/db/repositories/hour-ledger.repo'
+import type { LedgerKind } from '@/db/tables/hours'
 import { authorize, notFound } from '@/lib/authz/authorize'
 import { balanceOf } from '@/lib/core/ledger/balance'
 import { minutes } from '@/lib/core/ledger/minutes'
@@ -21,12 +22,9 @@ export const companyHours = operation('hours.companyHours', companyIdSchema, asy
   const rows = await listBlocks(deps.db, input.companyId)
   const open = await openBlocks(deps.db, input.companyId)
   const ledger = await listLedger(deps.db, input.companyId)
-  const totals = ledger.map((_, index) =>
-    balanceOf(ledger.slice(0, index + 1).map((entry) => ({ minutes: minutes(entry.minutes) }))),
-  )
   return ok({
     companyName: company.name,
-    balanceMinutes: totals.at(-1) ?? 0,
+    balanceMinutes: balanceOf(ledger.map((entry) => ({ minutes: minutes(entry.minutes) }))),
     spendableMinutes: spendableMinutes(open, now),
     blocks: rows.map((row) => ({
       blockId: row.id,
@@ -36,16 +34,33 @@ export const companyHours = operation('hours.companyHours', companyIdSchema, asy
       validUntil: row.valid_until,
       isExpired: row.valid_until <= now,
     })),
-    movements: ledger
-      .map((entry, index) => ({
-        entryId: entry.id,
-        at: entry.created_at,
-        kind: entry.kind,
-        text: entry.text,
-        engagement: entry.engagement_title,
-        minutes: entry.minutes,
-        balance: totals[index] ?? 0,
-      }))
-      .reverse(),
+    movements: movementsOf(ledger).reverse(),
   })
 })
+
+export type MovementDto = {
+  readonly entryId: string
+  readonly at: number
+  readonly kind: LedgerKind
+  readonly text: string
+  readonly engagement: string | null
+  readonly minutes: number
+  /** The balance after this movement. */
+  readonly balance: number
+}
+
+function movementsOf(ledger: readonly LedgerLine[]): MovementDto[] {
+  let balance = 0
+  return ledger.map((entry) => {
+    balance += entry.minutes
+    return {
+      entryId: entry.id,
+      at: entry.created_at,
+      kind: entry.kind,
+      text: entry.text,
+      engagement: entry.engagement_title,
+      minutes: entry.minutes,
+      balance,
+    }
+  })
+}

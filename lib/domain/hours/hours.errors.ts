@@ -5,12 +5,12 @@ import type { ServiceError } from '../service-error'
 export type HoursError = ServiceError<
   | 'timer_running'
   | 'no_timer'
-  | 'not_your_entry'
   | 'already_posted'
   | 'no_scope'
   | 'cap_exceeded'
   | 'insufficient_hours'
   | 'not_in_the_past'
+  | 'overlaps'
 >
 
 export const timerRunning = (engagement: string): HoursError => ({
@@ -49,3 +49,12 @@ export const notInThePast: HoursError = {
   message: 'Time is entered after it was worked.',
   fields: { startedAt: 'This work would end in the future.' },
 }
+
+/** `from` and `to` are UTC milliseconds of the time that is in the way. */
+export const overlaps = (engagement: string, from: number, to: number): HoursError => ({
+  code: 'overlaps',
+  message: `You worked on “${engagement}” from ${minuteText(from)} to ${minuteText(to)} UTC already, and time counts once. Change the start or the length of this entry.`,
+  fields: { startedAt: 'Overlaps with other time of yours.' },
+})
+
+const minuteText = (instant: number): string => new Date(instant).toISOString().slice(0, 16).replace('T', ' ')

@@ -3,7 +3,7 @@ import 'server-only'
 import type { Tx } from '@/db/client'
 import { insertLedgerEntry } from '@/db/repositories/hour-ledger.repo'
 import { postedMinutesOf } from '@/db/repositories/posted-time.repo'
-import { listDrafts, listPosted, updateTimeEntry } from '@/db/repositories/time-entry.repo'
+import { findOverlap, listDrafts, listPosted, updateTimeEntry } from '@/db/repositories/time-entry.repo'
 import { withTx } from '@/db/tx'
 import type { Actor } from '@/lib/authz/actor'
 import { isAllowed } from '@/lib/authz/authorize'
@@ -14,10 +14,10 @@ import { err, ok, type Result } from '@/lib/core/result'
 import type { Deps } from '../deps'
 import { approvedCapOf, engagementFor } from '../engagements/engagement-resource'
 import { operation } from '../operation'
-import { alreadyPosted, capExceeded, insufficientHours, noScope, type HoursError } from './hours.errors'
+import { capExceeded, insufficientHours, noScope, type HoursError } from './hours.errors'
 import { engagementIdSchema, timeEntryIdSchema } from './hours.schema'
 import { openBlocks, spendableMinutes } from './open-blocks'
-import { ownEntry, type OwnEntry } from './time-draft.service'
+import { overlapWith, ownDraft, type OwnEntry } from './time-draft.service'
 
 /** The time on an engagement: posted time for everybody on it, one's own drafts, and what room is left. */
 export const engagementTime = operation(
@@ -59,11 +59,12 @@ export const engagementTime = operation(
 
 /**
  * Posts a draft: rounds it up to the practice's six minutes, checks the approved cap, and debits the client's oldest
- * valid blocks. All of it happens in one transaction or not at all.
+ * valid blocks, all in one transaction or not at all. Errors: `already_posted`, `overlaps`, `no_scope`, `cap_exceeded`,
+ * `insufficient_hours`.
  */
 export const postTime = operation('hours.postTime', timeEntryIdSchema, async (deps, actor, input) =>
   withTx(deps.db, async (tx) => {
-    const own = await ownEntry(tx, actor, input.timeEntryId)
+    const own = await ownDraft(tx, actor, input.timeEntryId)
     if (!own.ok) return own
     return post(tx, deps, actor, own.value)
   }),
@@ -75,8 +76,9 @@ async function post(
   actor: Actor,
   { row, engagement }: OwnEntry,
 ): Promise<Result<{ readonly minutes: number }, HoursError>> {
-  if (row.posted_at !== null) return err(alreadyPosted)
   const minutes = billableMinutes(row.worked_seconds)
+  const other = await findOverlap(tx, spanOf(row), { postedOnly: true })
+  if (other) return err(overlapWith(other))
   const cap = await approvedCapOf(tx, row.engagement_id)
   if (cap === null) return err(noScope)
   const left = cap - (await postedMinutesOf(tx, row.engagement_id))
@@ -102,3 +104,9 @@ async function post(
   await updateTimeEntry(tx, row.id, { posted_minutes: minutes, posted_at: now })
   return ok({ minutes })
 }
+
+const spanOf = (row: OwnEntry['row']) => ({
+  personId: row.person_id,
+  from: row.started_at,
+  to: row.started_at + row.worked_seconds * 1000,
+})
