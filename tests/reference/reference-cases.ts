@@ -10,6 +10,7 @@ const caseSchema = z.object({
   expected: z.record(z.string(), z.unknown()),
   tolerance_rel: z.number(),
   tolerance_rel_by_output: z.record(z.string(), z.number()).default({}),
+  tolerance_abs_by_output: z.record(z.string(), z.number()).default({}),
   how_computed: z.string(),
   expect_error: z.boolean().default(false),
 })
@@ -26,15 +27,14 @@ export function referenceCases(file: string, topic: string): ReferenceCase[] {
   return found
 }
 
-/** Compares what was got with what is expected of a case, each output within its own relative tolerance. */
+/** Compares what was got with what is expected of a case, each output within its own tolerance. */
 export function expectWithin(item: ReferenceCase, got: Readonly<Record<string, number>>): void {
   for (const [key, value] of Object.entries(got)) {
     const expected = z.number().parse(item.expected[key])
-    const tolerance = item.tolerance_rel_by_output[key] ?? item.tolerance_rel
+    const relative = item.tolerance_rel_by_output[key] ?? item.tolerance_rel
+    const tolerance = item.tolerance_abs_by_output[key] ?? relative * Math.abs(expected) + 1e-300
     const difference = Math.abs(value - expected)
-    expect(difference, `${item.id} ${key}: ${value} for ${expected}`).toBeLessThanOrEqual(
-      tolerance * Math.abs(expected) + 1e-300,
-    )
+    expect(difference, `${item.id} ${key}: ${value} for ${expected}`).toBeLessThanOrEqual(tolerance)
   }
 }
 

@@ -1,18 +1,11 @@
 import { describe, expect, it } from 'vitest'
 
-import { findMethod } from '@/lib/core/method/registry'
 import { decrementOf, naturalFrequency } from '@/lib/core/snubber/parasitics'
 
+import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases } from './reference-cases'
 
 const file = './snubber-cases.json'
-
-function resultsOf(id: string, raw: Readonly<Record<string, number>>) {
-  const run = findMethod(id)?.run(raw)
-  if (!run?.ok) return null
-  const results = run.value.outcome.results
-  return (key: string) => results.find((result) => result.key === key)?.value ?? NaN
-}
 
 // Source: the closed form in 40-digit arithmetic, and a search for L and C whose roots give back both frequencies.
 describe('parasitics from two ring frequencies', () => {
@@ -63,5 +56,42 @@ describe('damping from two peaks', () => {
 
   it('refuses an amplitude that grows', () => {
     expect(decrementOf(1, 1.2, 3).ok).toBe(false)
+  })
+})
+
+// Source: the resonance formula, turned round on the cases with two frequencies.
+describe('inductance from one ring frequency', () => {
+  it.each(referenceCases(file, 'snubber.parasitics_two_freq').filter((item) => !item.expect_error))(
+    '$id',
+    (item) => {
+      const raw = { f0: input(item, 'f0'), cPar: Number(item.expected['c_par']) }
+      const result = resultsOf('ring-inductance', raw)
+      expectWithin(item, { l_par: result?.('lPar') ?? NaN, z0: result?.('z0') ?? NaN })
+    },
+  )
+})
+
+// Source: the energy integral of the linear fall of the current, by quadrature.
+describe('RCD clamp', () => {
+  it.each(referenceCases(file, 'snubber.rcd_clamp'))('$id: $how_computed', (item) => {
+    const result = resultsOf('rcd-clamp', {
+      lLeak: input(item, 'l_leak'),
+      iPeak: input(item, 'i_peak'),
+      fSw: input(item, 'f'),
+      vClamp: input(item, 'v_clamp'),
+      turnsRatio: input(item, 'n_ratio'),
+      vOut: input(item, 'v_out'),
+      ripple: input(item, 'ripple_v'),
+    })
+    if (item.expect_error) {
+      expect(result).toBeNull()
+      return
+    }
+    expectWithin(item, {
+      power: result?.('power') ?? NaN,
+      r_clamp: result?.('rClamp') ?? NaN,
+      c_clamp: result?.('cClamp') ?? NaN,
+      t_reset: result?.('resetTime') ?? NaN,
+    })
   })
 })

@@ -81,7 +81,7 @@ export type Method<Inputs extends InputDefinitions = InputDefinitions> = {
    * The results alone, with every proposal already among the values: for the thousands of draws of an interval. May
    * leave out results that need no interval. Absent where `compute` is quick enough.
    */
-  readonly computeResults?: (values: InputValues<Inputs>) => readonly ResultValue[]
+  readonly computeResults?: (values: InputValues<Inputs>) => Result<readonly ResultValue[], MethodError>
 }
 
 /** Keeps the exact input types of a definition. */

@@ -1,6 +1,15 @@
+import { cableEmission } from '../emission/cable.method'
+import { smallLoopEmission } from '../emission/small-loop.method'
+import { filterCorner } from '../filter/filter-corner.method'
+import { filterDamping } from '../filter/filter-damping.method'
 import type { Result } from '../result'
+import { planeShield } from '../shielding/plane-shield.method'
+import { stitchingDistance } from '../shielding/stitching.method'
 import { rcSnubber } from '../snubber/rc-snubber.method'
+import { rcdClamp } from '../snubber/rcd-clamp.method'
+import { ringInductance } from '../snubber/ring-inductance.method'
 import { ringParasitics } from '../snubber/ring-parasitics.method'
+import { pulseTrainSpectrum } from '../spectrum/pulse-train.method'
 import type { InputDefinitions, Method, MethodError } from './method'
 import type { RawInput } from './read-inputs'
 import type { RawTolerance } from './read-tolerances'
@@ -16,7 +25,19 @@ export type RegisteredMethod = Omit<Method, 'compute' | 'computeResults' | 'inpu
 }
 
 /** Every method of the practice. Adding one is a folder, its test, and a line here. */
-export const methods: readonly RegisteredMethod[] = [register(ringParasitics), register(rcSnubber)]
+export const methods: readonly RegisteredMethod[] = [
+  register(ringParasitics),
+  register(ringInductance),
+  register(rcSnubber),
+  register(rcdClamp),
+  register(pulseTrainSpectrum),
+  register(smallLoopEmission),
+  register(cableEmission),
+  register(planeShield),
+  register(stitchingDistance),
+  register(filterCorner),
+  register(filterDamping),
+]
 
 export const findMethod = (id: string): RegisteredMethod | undefined =>
   methods.find((method) => method.id === id)

@@ -38,7 +38,8 @@ function resultsAt<Inputs extends InputDefinitions>(
 ): Result<PlainValues, MethodError> {
   // The values hold every required input: they are those of a run that went well, with some of them moved.
   const typed = values as InputValues<Inputs>
-  if (method.computeResults) return finite(method.computeResults(typed))
+  const results = method.computeResults?.(typed)
+  if (results) return results.ok ? finite(results.value) : results
   const outcome = method.compute(typed)
   return outcome.ok ? finite(outcome.value.results) : outcome
 }

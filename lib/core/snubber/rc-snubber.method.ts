@@ -42,10 +42,10 @@ export const rcSnubber = defineMethod({
     const { bare, edge } = circuitOf(values)
     const snubbed = withSnubber(bare, values.rSnub ?? 0, values.cSnub ?? 0)
     const after = switchEdge(snubbed, edge)
-    return [
+    return ok([
       ...chosenParts(snubbed, overshootOf(bare, edge.duration), after),
       ...losses(snubbed, after, edge.step, values.fSw),
-    ]
+    ])
   },
 })
 

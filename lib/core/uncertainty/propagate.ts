@@ -61,10 +61,13 @@ export function propagate<E>(
     }
     const results = model(values)
     if (!results.ok) return results
-    for (const [key, value] of Object.entries(results.value)) {
-      const effect = effects.get(key) ?? new Float64Array(usualDraws)
-      effect[index] = value
-      effects.set(key, effect)
+    if (index === 0)
+      for (const key of Object.keys(results.value)) effects.set(key, new Float64Array(usualDraws))
+    for (const [key, effect] of effects) {
+      const value = results.value[key]
+      // A result that not every draw has, such as the level of a null, has no interval.
+      if (value === undefined) effects.delete(key)
+      else effect[index] = value
     }
   }
   const intervals = [...effects].map(([key, effect]) => intervalOf(key, effect, inputs, causes))

@@ -1,0 +1,67 @@
+import { defineMethod } from '../method/method'
+import { main, step } from '../method/result-value'
+import { speedOfLight } from '../physics/constants'
+import { ok } from '../result'
+
+const usualFraction = 20
+
+/** How close vias must stand that tie two planes or a guard together. */
+export const stitchingDistance = defineMethod({
+  id: 'stitching-distance',
+  version: 1,
+  title: 'Distance of stitching vias',
+  purpose:
+    'Gives the largest distance between vias that tie planes or a guard ring together up to a frequency.',
+  inputs: {
+    frequency: {
+      label: 'Highest frequency',
+      symbol: 'f_max',
+      unit: 'Hz',
+      help: 'That matters: of the limit, or 1/(π t) of the fastest edge',
+      isRequired: true,
+      atLeast: 1e3,
+      atMost: 1e13,
+    },
+    permittivity: {
+      label: 'Effective relative permittivity',
+      symbol: 'ε_eff',
+      unit: '',
+      help: 'Between the planes that of the laminate, about 4.2 for FR-4',
+      isRequired: true,
+      atLeast: 1,
+      atMost: 1000,
+    },
+    fraction: {
+      label: 'Parts of a wavelength',
+      symbol: 'N',
+      unit: '',
+      help: 'Left empty, 20; 10 is sometimes taken',
+      isRequired: false,
+      atLeast: 2,
+      atMost: 1000,
+    },
+  },
+  formulas: ['λ = c / (f_max √ε_eff)', 's = λ / N'],
+  notes: [
+    'A twentieth of a wavelength is a rule of thumb: shorter helps, and nothing changes suddenly at it.',
+  ],
+  cautions: ['A rule of thumb is no statement of conformity.'],
+  sources: [
+    {
+      citation: 'A twentieth of a wavelength between stitching vias',
+      standing: 'common practice, no source',
+    },
+  ],
+  compute: ({ frequency, permittivity, fraction = usualFraction }) => {
+    const wavelength = speedOfLight / (frequency * Math.sqrt(permittivity))
+    return ok({
+      results: [
+        main('distance', 'Largest distance', 's', 'm', wavelength / fraction),
+        step('wavelength', 'Wavelength', 'λ', 'm', wavelength),
+      ],
+      choices: [],
+      validity: [],
+      figures: [],
+    })
+  },
+})
