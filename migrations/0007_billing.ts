@@ -47,11 +47,16 @@ export const billing: Migration = {
       gross_cents integer not null check (gross_cents > 0),
       currency text not null check (length(currency) = 3),
       balance_transaction_id text unique,
+      settled_cents integer,
+      settled_currency text check (length(settled_currency) = 3),
       fee_cents integer,
       net_cents integer,
       created_at integer not null,
-      check ((fee_cents is null) = (net_cents is null)),
-      check (fee_cents is null or gross_cents = fee_cents + net_cents)
+      check ((balance_transaction_id is null) = (settled_cents is null)),
+      check ((settled_cents is null) = (settled_currency is null)),
+      check ((settled_cents is null) = (fee_cents is null)),
+      check ((settled_cents is null) = (net_cents is null)),
+      check (settled_cents is null or settled_cents = fee_cents + net_cents)
     ) strict`,
     sql`create table provider_event (
       id text primary key,

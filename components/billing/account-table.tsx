@@ -1,15 +1,15 @@
 import { DataTable } from '../ui/data-table'
 import { Minutes } from '../ui/minutes'
 import { TextLink } from '../ui/text-link'
-import { AgreementList } from './agreement-list'
+import { CheckList, type Check } from './check-list'
 
-export type Account = {
+type Account = {
   readonly companyId: string
   readonly companyName: string
   readonly creditedMinutes: number
   readonly debitedMinutes: number
   readonly balanceMinutes: number
-  readonly agreements: readonly { readonly agrees: boolean; readonly sentence: string }[]
+  readonly checks: readonly Check[]
 }
 
 /** Credits, debits and balance of every company. */
@@ -46,11 +46,7 @@ export const AccountTable = ({ accounts }: { readonly accounts: readonly Account
         align: 'end',
         cell: (account) => <Minutes minutes={account.balanceMinutes} />,
       },
-      {
-        key: 'agree',
-        header: 'Agreement',
-        cell: (account) => <AgreementList agreements={account.agreements} />,
-      },
+      { key: 'checks', header: 'Checks', cell: (account) => <CheckList checks={account.checks} /> },
     ]}
   />
 )

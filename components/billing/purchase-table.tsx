@@ -1,59 +1,114 @@
-import { DataTable } from '../ui/data-table'
+import type { ReactNode } from 'react'
+
+import { DataTable, type Column } from '../ui/data-table'
 import { Minutes } from '../ui/minutes'
-import { moneyDigits } from '../ui/money'
-import { AgreementList } from './agreement-list'
+import { Money, moneyDigits } from '../ui/money'
+import { dayInWords } from '../ui/timestamp'
+import { CheckList, type Check } from './check-list'
+import { PurchaseState, type PurchaseStatus } from './purchase-state'
 
 export type PurchaseLine = {
   readonly purchaseId: string
   readonly companyName: string
   readonly title: string
-  readonly status: string
+  readonly status: PurchaseStatus
   readonly receiptNumber: number | null
+  readonly createdAt: number
+  readonly paidAt: number | null
   readonly currency: string
-  readonly priceCents: number
   readonly grossCents: number | null
   readonly feeCents: number | null
   readonly netCents: number | null
   readonly creditedMinutes: number
-  readonly agreements: readonly { readonly agrees: boolean; readonly sentence: string }[]
+  readonly debitedMinutes: number
+  readonly remainingMinutes: number
+  readonly checks: readonly Check[]
 }
 
-const money = (line: PurchaseLine, cents: number | null) =>
-  cents === null ? null : { number: moneyDigits(cents), unit: line.currency }
+type Sums = Pick<PurchaseLine, 'currency' | 'creditedMinutes' | 'debitedMinutes' | 'remainingMinutes'> & {
+  readonly grossCents: number
+  readonly feeCents: number
+  readonly netCents: number
+}
 
-/** Price, payment, fee, net and credited hours of every purchase, side by side. */
-export const PurchaseTable = ({ purchases }: { readonly purchases: readonly PurchaseLine[] }) => (
-  <DataTable
-    caption="Purchases, payments and credits"
-    captionHidden
-    rows={purchases}
-    rowKey={(line) => line.purchaseId}
-    columns={[
-      {
-        key: 'purchase',
-        header: 'Purchase',
-        isRowHeader: true,
-        cell: (line) => (
-          <>
-            {line.companyName}
-            <span className="block text-sm font-normal text-ink-soft">
-              {line.title}, {line.status}
-              {line.receiptNumber === null ? '' : `, receipt ${line.receiptNumber}`}
-            </span>
-          </>
-        ),
-      },
-      { key: 'price', header: 'Price', kind: 'number', value: (line) => money(line, line.priceCents) },
-      { key: 'gross', header: 'Paid', kind: 'number', value: (line) => money(line, line.grossCents) },
-      { key: 'fee', header: 'Fee', kind: 'number', value: (line) => money(line, line.feeCents) },
-      { key: 'net', header: 'Net', kind: 'number', value: (line) => money(line, line.netCents) },
-      {
-        key: 'credit',
-        header: 'Credited',
-        align: 'end',
-        cell: (line) => <Minutes minutes={line.creditedMinutes} />,
-      },
-      { key: 'agree', header: 'Agreement', cell: (line) => <AgreementList agreements={line.agreements} /> },
-    ]}
-  />
-)
+type PurchaseTableProps = { readonly purchases: readonly PurchaseLine[]; readonly totals: readonly Sums[] }
+
+const moneyColumn = (header: string, key: 'grossCents' | 'feeCents' | 'netCents'): Column<PurchaseLine> => ({
+  key,
+  header,
+  kind: 'number',
+  value: (line) => {
+    const amount = line[key]
+    return amount === null ? null : { number: moneyDigits(amount), unit: line.currency }
+  },
+})
+
+const minutesColumn = (
+  header: string,
+  key: 'creditedMinutes' | 'debitedMinutes' | 'remainingMinutes',
+): Column<PurchaseLine> => ({ key, header, align: 'end', cell: (line) => <Minutes minutes={line[key]} /> })
+
+const columns: readonly Column<PurchaseLine>[] = [
+  {
+    key: 'purchase',
+    header: 'Purchase',
+    isRowHeader: true,
+    cell: (line) => (
+      <>
+        {line.companyName}
+        <span className="block text-sm font-normal text-ink-soft">
+          {line.title}
+          {line.receiptNumber === null ? '' : `, receipt ${line.receiptNumber}`}
+        </span>
+        <span className="block text-sm font-normal text-ink-soft">
+          {dayInWords(line.paidAt ?? line.createdAt)}
+        </span>
+      </>
+    ),
+  },
+  moneyColumn('Paid', 'grossCents'),
+  moneyColumn('Fee', 'feeCents'),
+  moneyColumn('Net', 'netCents'),
+  minutesColumn('Credited', 'creditedMinutes'),
+  minutesColumn('Debited', 'debitedMinutes'),
+  minutesColumn('Left', 'remainingMinutes'),
+  {
+    key: 'checks',
+    header: 'Checks',
+    cell: (line) => (
+      <>
+        {line.status === 'paid' ? null : <PurchaseState status={line.status} />}
+        <CheckList checks={line.checks} />
+      </>
+    ),
+  },
+]
+
+/** Each purchase with its money and its hours side by side, and their sums. */
+export const PurchaseTable = ({ purchases, totals }: PurchaseTableProps) => {
+  const stacked = (cell: (sums: Sums) => ReactNode) =>
+    totals.map((sums) => (
+      <span key={sums.currency} className="block">
+        {cell(sums)}
+      </span>
+    ))
+  return (
+    <DataTable
+      caption="Purchases, newest first"
+      captionHidden
+      rows={purchases}
+      rowKey={(line) => line.purchaseId}
+      columns={columns}
+      footer={[
+        'Sum',
+        stacked((sums) => <Money cents={sums.grossCents} currency={sums.currency} />),
+        stacked((sums) => <Money cents={sums.feeCents} currency={sums.currency} />),
+        stacked((sums) => <Money cents={sums.netCents} currency={sums.currency} />),
+        stacked((sums) => <Minutes minutes={sums.creditedMinutes} />),
+        stacked((sums) => <Minutes minutes={sums.debitedMinutes} />),
+        stacked((sums) => <Minutes minutes={sums.remainingMinutes} />),
+        '',
+      ]}
+    />
+  )
+}

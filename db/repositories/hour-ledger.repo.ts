@@ -25,6 +25,18 @@ export function listBlocks(db: Db | Tx, companyId: string): Promise<BlockRow[]> 
     .execute()
 }
 
+export function findBlockOf(
+  db: Db | Tx,
+  source: { readonly kind: string; readonly id: string },
+): Promise<BlockRow | undefined> {
+  return db
+    .selectFrom('hour_block')
+    .selectAll()
+    .where('source_kind', '=', source.kind)
+    .where('source_id', '=', source.id)
+    .executeTakeFirst()
+}
+
 export type LedgerLine = LedgerRow & { readonly engagement_title: string | null }
 
 /** Every entry of a company in the order of writing, with the engagement that a debit belongs to. */

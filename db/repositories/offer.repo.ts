@@ -1,7 +1,7 @@
 import 'server-only'
 import type { Selectable } from 'kysely'
 
-import type { Db } from '@/db/client'
+import type { Db, Tx } from '@/db/client'
 import type { BlockOfferTable } from '@/db/tables/billing'
 
 export type OfferRow = Selectable<BlockOfferTable>
@@ -16,7 +16,12 @@ export function listOffers(db: Db): Promise<OfferRow[]> {
     .execute()
 }
 
-export function findOffer(db: Db, offerId: string): Promise<OfferRow | undefined> {
+/** The whole catalogue, also what was taken off sale, smallest first. */
+export function listCatalogue(db: Db): Promise<OfferRow[]> {
+  return db.selectFrom('block_offer').selectAll().orderBy('minutes').orderBy('created_at').execute()
+}
+
+export function findOffer(db: Db | Tx, offerId: string): Promise<OfferRow | undefined> {
   return db
     .selectFrom('block_offer')
     .selectAll()

@@ -6,6 +6,15 @@ import type { PaymentTable } from '@/db/tables/billing'
 
 export type PaymentRow = Selectable<PaymentTable>
 
+/** What the provider booked for a payment: grossCents = feeCents + netCents. */
+export type Booking = {
+  readonly id: string
+  readonly grossCents: number
+  readonly feeCents: number
+  readonly netCents: number
+  readonly currency: string
+}
+
 export async function insertPayment(tx: Tx, payment: Insertable<PaymentTable>): Promise<void> {
   await tx.insertInto('payment').values(payment).execute()
 }
@@ -16,20 +25,23 @@ export function listPayments(db: Db): Promise<PaymentRow[]> {
 
 /** Payments whose fee the provider has not told us yet. */
 export function listUnsettledPayments(db: Db): Promise<PaymentRow[]> {
-  return db.selectFrom('payment').selectAll().where('balance_transaction_id', 'is', null).execute()
+  return db
+    .selectFrom('payment')
+    .selectAll()
+    .where('balance_transaction_id', 'is', null)
+    .orderBy('created_at')
+    .execute()
 }
 
-export async function settlePayment(
-  db: Db,
-  paymentId: string,
-  settled: { readonly balanceTransactionId: string; readonly feeCents: number; readonly netCents: number },
-): Promise<void> {
+export async function settlePayment(db: Db, paymentId: string, booked: Booking): Promise<void> {
   await db
     .updateTable('payment')
     .set({
-      balance_transaction_id: settled.balanceTransactionId,
-      fee_cents: settled.feeCents,
-      net_cents: settled.netCents,
+      balance_transaction_id: booked.id,
+      settled_cents: booked.grossCents,
+      settled_currency: booked.currency,
+      fee_cents: booked.feeCents,
+      net_cents: booked.netCents,
     })
     .where('id', '=', paymentId)
     .execute()

@@ -1,8 +1,10 @@
 import 'server-only'
-import type { Insertable } from 'kysely'
+import type { Insertable, Selectable } from 'kysely'
 
-import type { Tx } from '@/db/client'
-import type { ProviderEventTable } from '@/db/tables/billing'
+import type { Db, Tx } from '@/db/client'
+import type { ProviderEventOutcome, ProviderEventTable } from '@/db/tables/billing'
+
+export type ProviderEventRow = Selectable<ProviderEventTable>
 
 export async function hasProviderEvent(tx: Tx, eventId: string): Promise<boolean> {
   const row = await tx.selectFrom('provider_event').select('id').where('id', '=', eventId).executeTakeFirst()
@@ -11,6 +13,26 @@ export async function hasProviderEvent(tx: Tx, eventId: string): Promise<boolean
 
 export async function insertProviderEvent(tx: Tx, event: Insertable<ProviderEventTable>): Promise<void> {
   await tx.insertInto('provider_event').values(event).execute()
+}
+
+export function listEvents(
+  db: Db,
+  which: { readonly outcome: ProviderEventOutcome } | { readonly types: readonly string[] },
+): Promise<ProviderEventRow[]> {
+  const query = db.selectFrom('provider_event').selectAll().orderBy('received_at', 'desc')
+  return 'outcome' in which
+    ? query.where('outcome', '=', which.outcome).execute()
+    : query.where('type', 'in', [...which.types]).execute()
+}
+
+export async function hasEffect(db: Db, objectId: string, effect: string): Promise<boolean> {
+  const row = await db
+    .selectFrom('provider_effect')
+    .select('event_id')
+    .where('object_id', '=', objectId)
+    .where('effect', '=', effect)
+    .executeTakeFirst()
+  return row !== undefined
 }
 
 /** @returns false when this effect on this object was had before, by whichever event. */

@@ -14,6 +14,32 @@ export function findPurchase(db: Db | Tx, purchaseId: string): Promise<PurchaseR
   return db.selectFrom('purchase').selectAll().where('id', '=', purchaseId).executeTakeFirst()
 }
 
+/** The latest open purchase of one offer for which the provider has not named a checkout yet. */
+export function findPurchaseWithoutSession(
+  tx: Tx,
+  whose: { readonly companyId: string; readonly personId: string; readonly offerId: string },
+): Promise<PurchaseRow | undefined> {
+  return tx
+    .selectFrom('purchase')
+    .selectAll()
+    .where('company_id', '=', whose.companyId)
+    .where('person_id', '=', whose.personId)
+    .where('offer_id', '=', whose.offerId)
+    .where('status', '=', 'open')
+    .where('session_id', 'is', null)
+    .orderBy('created_at', 'desc')
+    .executeTakeFirst()
+}
+
+export function listPurchasesOf(db: Db, companyId: string): Promise<PurchaseRow[]> {
+  return db
+    .selectFrom('purchase')
+    .selectAll()
+    .where('company_id', '=', companyId)
+    .orderBy('created_at', 'desc')
+    .execute()
+}
+
 export function listPurchases(db: Db): Promise<(PurchaseRow & { company_name: string })[]> {
   return db
     .selectFrom('purchase')
@@ -24,8 +50,14 @@ export function listPurchases(db: Db): Promise<(PurchaseRow & { company_name: st
     .execute()
 }
 
-export async function setSession(db: Db, purchaseId: string, sessionId: string): Promise<void> {
-  await db.updateTable('purchase').set({ session_id: sessionId }).where('id', '=', purchaseId).execute()
+/** Notes the provider's checkout once; the event that reports its payment may have done so before. */
+export async function setSession(tx: Tx, purchaseId: string, sessionId: string): Promise<void> {
+  await tx
+    .updateTable('purchase')
+    .set({ session_id: sessionId })
+    .where('id', '=', purchaseId)
+    .where('session_id', 'is', null)
+    .execute()
 }
 
 /** @returns false when the purchase no longer stands in one of the given states. */

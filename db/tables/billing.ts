@@ -40,6 +40,9 @@ export type PaymentTable = {
   gross_cents: number
   currency: string
   balance_transaction_id: string | null
+  /** What the provider booked; more or less than what was paid is a difference that the books show. */
+  settled_cents: number | null
+  settled_currency: string | null
   fee_cents: number | null
   net_cents: number | null
   created_at: number

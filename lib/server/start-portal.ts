@@ -4,6 +4,7 @@ import { pendingMigrations } from '@/db/migrate'
 import { finishInterruptedChecks } from '@/lib/domain/evidence/check-capture'
 
 import { container } from './container'
+import { startFeeCollector } from './fee-collector'
 import { startOutboxDispatcher } from './outbox-dispatcher'
 
 /** Reads the settings, opens the database, makes sure that its schema is this build's, and takes up cut-off checks. */
@@ -16,6 +17,7 @@ export async function startPortal(): Promise<void> {
       throw new Error(`The database lacks ${names}. Run: npm run migrate`)
     }
     startOutboxDispatcher(container())
+    startFeeCollector(container())
     const checksTakenUp = await finishInterruptedChecks(deps)
     log.info({ publicUrl: env.publicUrl, checksTakenUp }, 'portal started')
   } catch (error) {

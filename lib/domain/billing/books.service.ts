@@ -1,9 +1,11 @@
 import 'server-only'
 
-import { listCompanies } from '@/db/repositories/company.repo'
-import { listLedger } from '@/db/repositories/hour-ledger.repo'
+import { listCompanies, type CompanyRow } from '@/db/repositories/company.repo'
+import { listBlocks, listLedger, type BlockRow, type LedgerRow } from '@/db/repositories/hour-ledger.repo'
+import { listCatalogue } from '@/db/repositories/offer.repo'
 import { listPayments, type PaymentRow } from '@/db/repositories/payment.repo'
 import { postedMinutesOfCompany } from '@/db/repositories/posted-time.repo'
+import { listEvents } from '@/db/repositories/provider-event.repo'
 import { listPurchases, type PurchaseRow } from '@/db/repositories/purchase.repo'
 import { authorize } from '@/lib/authz/authorize'
 import { practice } from '@/lib/authz/resource'
@@ -12,39 +14,56 @@ import { ok } from '@/lib/core/result'
 import type { Deps } from '../deps'
 import { noInput } from '../form-fields'
 import { operation } from '../operation'
-import { settlePayments } from './event.service'
-
-/** One thing that must hold between two books, with the sentence that says whether it does. */
-export type Agreement = { readonly agrees: boolean; readonly sentence: string }
+import { accountChecks, purchaseChecks, receiptCheck, type BlockFigures } from './books-checks'
+import { totalsByCurrency } from './books-totals'
+import { offerOf } from './offer-dto'
+import { settlePayments } from './settle-payments'
 
 /**
- * The books side by side: for each purchase its payment, fee and net and the hours it credited; for each company its
- * credits, debits and balance; and whether all of them agree.
+ * The books side by side: for each purchase its payment, fee and net and what the ledger holds of its hours; for each
+ * company its credits, debits and balance; their sums; whether all of them agree; and the provider's events that
+ * somebody must look at.
  */
 export const booksOverview = operation('billing.booksOverview', noInput, async (deps, actor) => {
   const allowed = authorize(actor, 'books.read', practice)
   if (!allowed.ok) return allowed
-  await settlePayments(deps)
-  const [purchases, payments, companies] = await Promise.all([
-    listPurchases(deps.db),
-    listPayments(deps.db),
-    listCompanies(deps.db),
-  ])
-  const accounts = await Promise.all(companies.map((company) => accountOf(deps, company)))
-  const credits = new Map(accounts.flatMap((account) => [...account.creditsBySource]))
+  const purchases = await listPurchases(deps.db)
+  const payments = await listPayments(deps.db)
+  const companies = await listCompanies(deps.db)
+  const accounts = await Promise.all(companies.map((company) => accountOf(deps, company, purchases)))
+  const blocks = new Map(accounts.flatMap((account) => [...account.blocks]))
+  const paymentOf = new Map(payments.map((payment) => [payment.purchase_id, payment]))
+  const receiptNumbers = purchases.flatMap(({ receipt_number }) => receipt_number ?? [])
+  const lines = purchases.map((purchase) =>
+    purchaseLine(purchase, paymentOf.get(purchase.id), blocks.get(purchase.id)),
+  )
   return ok({
-    purchases: purchases.map((purchase) => {
-      const payment = payments.find((candidate) => candidate.purchase_id === purchase.id)
-      return purchaseLine(purchase, payment, credits.get(purchase.id) ?? 0)
-    }),
-    accounts: accounts.map(({ creditsBySource: _, ...account }) => account),
+    purchases: lines,
+    totals: totalsByCurrency(lines),
+    accounts: accounts.map(({ blocks: _, ...account }) => account),
+    checks: [receiptCheck(receiptNumbers, payments.length)],
+    events: await eventsToLookAt(deps),
   })
+})
+
+/** The catalogue as the administrator sees it: all blocks, also those taken off sale. */
+export const catalogue = operation('billing.catalogue', noInput, async (deps, actor) => {
+  const allowed = authorize(actor, 'books.read', practice)
+  if (!allowed.ok) return allowed
+  const rows = await listCatalogue(deps.db)
+  return ok(rows.map((row) => ({ ...offerOf(row), isOnSale: row.archived_at === null })))
+})
+
+/** Asks the provider now for the fees that it has not told yet. */
+export const fetchFees = operation('billing.fetchFees', noInput, async (deps, actor) => {
+  const allowed = authorize(actor, 'books.read', practice)
+  return allowed.ok ? ok(await settlePayments(deps)) : allowed
 })
 
 function purchaseLine(
   purchase: PurchaseRow & { readonly company_name: string },
   payment: PaymentRow | undefined,
-  creditedMinutes: number,
+  block: BlockFigures | undefined,
 ) {
   return {
     purchaseId: purchase.id,
@@ -52,76 +71,73 @@ function purchaseLine(
     title: purchase.title,
     status: purchase.status,
     receiptNumber: purchase.receipt_number,
+    createdAt: purchase.created_at,
     paidAt: purchase.paid_at,
     currency: purchase.currency,
-    priceCents: purchase.gross_cents,
     grossCents: payment?.gross_cents ?? null,
     feeCents: payment?.fee_cents ?? null,
     netCents: payment?.net_cents ?? null,
-    creditedMinutes,
-    agreements: purchaseAgreements(purchase, payment, creditedMinutes),
+    creditedMinutes: block?.credited ?? 0,
+    debitedMinutes: block?.debited ?? 0,
+    remainingMinutes: block?.remaining ?? 0,
+    checks: purchaseChecks(purchase, payment, block),
   }
 }
 
-function purchaseAgreements(
-  purchase: PurchaseRow,
-  payment: PaymentRow | undefined,
-  creditedMinutes: number,
-): Agreement[] {
-  if (purchase.status !== 'paid') {
-    const agrees = payment === undefined && creditedMinutes === 0
-    return [
-      { agrees, sentence: agrees ? 'Not paid, nothing credited' : 'Not paid, yet money or hours moved' },
-    ]
-  }
-  const isPaidInFull = payment?.gross_cents === purchase.gross_cents
-  const isCredited = creditedMinutes === purchase.minutes
-  const isSettled = payment?.fee_cents != null
-  return [
-    {
-      agrees: isPaidInFull,
-      sentence: isPaidInFull ? 'Payment equals price' : 'Payment differs from the price',
-    },
-    {
-      agrees: isCredited,
-      sentence: isCredited ? 'Hours equal the block' : 'Credited hours differ from the block',
-    },
-    {
-      agrees: isSettled,
-      sentence: isSettled
-        ? 'Gross less fee is net'
-        : 'The provider has not told the fee yet; open the page again later',
-    },
-  ]
-}
-
-async function accountOf(deps: Deps, company: { readonly id: string; readonly name: string }) {
+async function accountOf(deps: Deps, company: CompanyRow, purchases: readonly PurchaseRow[]) {
   const ledger = await listLedger(deps.db, company.id)
-  const sumOf = (kind: string) =>
-    ledger.filter((entry) => entry.kind === kind).reduce((sum, entry) => sum + entry.minutes, 0)
-  const balance = ledger.reduce((sum, entry) => sum + entry.minutes, 0)
-  const debited = -sumOf('debit')
-  const posted = await postedMinutesOfCompany(deps.db, company.id)
-  const agrees = posted === debited
-  const agreement: Agreement = {
-    agrees,
-    sentence: agrees ? 'Debits equal posted time' : `Posted time is ${posted} min, debits are ${debited} min`,
+  const blocks = await listBlocks(deps.db, company.id)
+  const bought = blocks.filter((block) => block.source_kind === 'purchase')
+  const figures = {
+    soldMinutes: purchases
+      .filter((purchase) => purchase.company_id === company.id && purchase.status === 'paid')
+      .reduce((sum, purchase) => sum + purchase.minutes, 0),
+    creditedMinutes: sumOf(ledger, 'credit'),
+    debitedMinutes: 0 - sumOf(ledger, 'debit'),
+    postedMinutes: await postedMinutesOfCompany(deps.db, company.id),
+    balanceMinutes: sumOf(ledger),
   }
   return {
     companyId: company.id,
     companyName: company.name,
-    creditedMinutes: sumOf('credit'),
-    debitedMinutes: debited,
-    balanceMinutes: balance,
-    agreements: [
-      agreement,
-      {
-        agrees: balance >= 0,
-        sentence: balance >= 0 ? 'Balance is not below zero' : 'Balance is below zero',
-      },
-    ],
-    creditsBySource: ledger
-      .filter((entry) => entry.kind === 'credit')
-      .map((entry) => [entry.source_id, entry.minutes] as const),
+    creditedMinutes: figures.creditedMinutes,
+    debitedMinutes: figures.debitedMinutes,
+    balanceMinutes: figures.balanceMinutes,
+    checks: accountChecks(figures),
+    /** By the purchase that each block came from. */
+    blocks: new Map(bought.map((block) => [block.source_id, blockFigures(block, ledger)])),
   }
+}
+
+function blockFigures(block: BlockRow, ledger: readonly LedgerRow[]): BlockFigures {
+  const entries = ledger.filter((entry) => entry.block_id === block.id)
+  return {
+    minutes: block.minutes,
+    credited: sumOf(entries, 'credit'),
+    debited: 0 - sumOf(entries, 'debit'),
+    remaining: sumOf(entries),
+    validUntil: block.valid_until,
+  }
+}
+
+const sumOf = (entries: readonly LedgerRow[], kind?: LedgerRow['kind']): number =>
+  entries
+    .filter((entry) => kind === undefined || entry.kind === kind)
+    .reduce((sum, entry) => sum + entry.minutes, 0)
+
+const settledByHand = ['charge.refunded', 'charge.dispute.created', 'charge.dispute.closed'] as const
+
+/** Events that were refused, and those that an administrator settles by hand; newest first. */
+async function eventsToLookAt({ db }: Deps) {
+  const refused = await listEvents(db, { outcome: 'refused' })
+  const byHand = await listEvents(db, { types: settledByHand })
+  return [...refused, ...byHand.filter((event) => event.outcome !== 'refused')]
+    .map(({ id, type, received_at, outcome, note }) => ({
+      eventId: id,
+      type,
+      receivedAt: received_at,
+      isRefused: outcome === 'refused',
+      note,
+    }))
+    .sort((a, b) => b.receivedAt - a.receivedAt)
 }

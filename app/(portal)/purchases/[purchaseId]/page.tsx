@@ -3,37 +3,24 @@ import type { Metadata } from 'next'
 import { PurchaseProgress } from '@/components/billing/purchase-progress'
 import { PageBody } from '@/components/shell/page-body'
 import { PageHeader } from '@/components/shell/page-header'
-import { DescriptionList } from '@/components/ui/description-list'
-import { Minutes } from '@/components/ui/minutes'
-import { Money } from '@/components/ui/money'
-import { Sheet } from '@/components/ui/sheet'
-import { checkouts } from '@/lib/server/operations'
+import { purchases } from '@/lib/server/operations'
 import { query } from '@/lib/server/query'
+
+import { startCheckout } from '../../companies/[companyId]/hours/buy/actions'
 
 export const metadata: Metadata = { title: 'Your purchase' }
 
 export default async function PurchasePage({ params }: PageProps<'/purchases/[purchaseId]'>) {
   const { purchaseId } = await params
-  const purchase = await query(checkouts.purchaseStatus, { purchaseId })
+  const purchase = await query(purchases.purchaseStatus, { purchaseId })
   return (
     <>
-      <PageHeader title="Your purchase" />
+      <PageHeader
+        title="Your purchase"
+        crumbs={[{ label: 'Hours', href: `/companies/${purchase.companyId}/hours` }, { label: 'Purchase' }]}
+      />
       <PageBody>
-        <PurchaseProgress
-          purchaseId={purchaseId}
-          companyId={purchase.companyId}
-          minutes={purchase.minutes}
-          initial={purchase.status}
-        />
-        <Sheet>
-          <DescriptionList
-            items={[
-              { term: 'Block', detail: purchase.title },
-              { term: 'Hours', detail: <Minutes minutes={purchase.minutes} /> },
-              { term: 'Price', detail: <Money cents={purchase.grossCents} currency={purchase.currency} /> },
-            ]}
-          />
-        </Sheet>
+        <PurchaseProgress initial={purchase} begin={startCheckout} />
       </PageBody>
     </>
   )

@@ -1,3 +1,6 @@
+import { after } from 'next/server'
+
+import { collectFees } from '@/lib/server/fee-collector'
 import { guarded, privateJson, problem } from '@/lib/server/http'
 import { paymentEvents } from '@/lib/server/operations'
 
@@ -11,6 +14,6 @@ export const POST = (request: Request): Promise<Response> =>
     const signature = request.headers.get('stripe-signature')
     const received = await paymentEvents.receiveEvent.execute(deps, { rawBody, signature })
     if (!received.ok) return problem(received.error, deps.request.id)
-    void paymentEvents.settlePayments(deps).catch(() => undefined)
+    after(collectFees)
     return privateJson({ outcome: received.value.outcome })
   })
