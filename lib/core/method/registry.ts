@@ -2,6 +2,12 @@ import { cableEmission } from '../emission/cable.method'
 import { smallLoopEmission } from '../emission/small-loop.method'
 import { filterCorner } from '../filter/filter-corner.method'
 import { filterDamping } from '../filter/filter-damping.method'
+import { circularLoopInductance } from '../inductance/circular-loop.method'
+import { loopVoltage } from '../inductance/loop-voltage.method'
+import { rectangularLoopInductance } from '../inductance/rectangular-loop.method'
+import { traceOverPlaneInductance } from '../inductance/trace-over-plane.method'
+import { viaReturnInductance } from '../inductance/via-return.method'
+import { wirePairInductance } from '../inductance/wire-pair.method'
 import type { Result } from '../result'
 import { planeShield } from '../shielding/plane-shield.method'
 import { stitchingDistance } from '../shielding/stitching.method'
@@ -31,6 +37,12 @@ export const methods: readonly RegisteredMethod[] = [
   register(rcSnubber),
   register(rcdClamp),
   register(pulseTrainSpectrum),
+  register(rectangularLoopInductance),
+  register(circularLoopInductance),
+  register(traceOverPlaneInductance),
+  register(wirePairInductance),
+  register(viaReturnInductance),
+  register(loopVoltage),
   register(smallLoopEmission),
   register(cableEmission),
   register(planeShield),
