@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process'
-import { existsSync, statSync } from 'node:fs'
+import { existsSync, readFileSync } from 'node:fs'
 
 import { run } from './run.mjs'
 import { say, stop } from './say.mjs'
@@ -15,12 +15,10 @@ const testTools = {
   ngspice: 'ngspice',
 }
 
-/** Installs the packages of package-lock.json when they are absent or older than the lock file. */
+/** Installs the packages of package-lock.json where they are absent or of other versions. */
 export async function installPackages() {
   checkNode()
-  const marker = 'node_modules/.package-lock.json'
-  const isCurrent = existsSync(marker) && statSync(marker).mtimeMs >= statSync('package-lock.json').mtimeMs
-  if (isCurrent) return
+  if (isInstalled()) return
   await installTools(buildTools, 'to compile the database driver')
   say('Installing packages with npm ci (about two minutes; the database driver is compiled)')
   await run('npm', ['ci', '--no-audit', '--no-fund', '--loglevel=error'])
@@ -28,6 +26,19 @@ export async function installPackages() {
 
 /** Installs what the tests check results with: a browser, PDF tools, a circuit simulator. */
 export const installTestTools = () => installTools(testTools, 'for the tests')
+
+/** npm keeps a list of what it put into node_modules; it must hold every package of the lock file that is not optional. */
+function isInstalled() {
+  const installed = packagesOf('node_modules/.package-lock.json')
+  const wanted = Object.entries(packagesOf('package-lock.json') ?? {})
+  return wanted.every(
+    ([name, { version, optional }]) => name === '' || optional || installed?.[name]?.version === version,
+  )
+}
+
+function packagesOf(file) {
+  return existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')).packages : undefined
+}
 
 function checkNode() {
   const [major = 0, minor = 0] = process.versions.node.split('.').map(Number)
