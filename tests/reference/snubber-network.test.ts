@@ -8,6 +8,7 @@ import {
   overshootOf,
   withSnubber,
 } from '@/lib/core/snubber/optimum'
+import { settledEdgeLoss, squareWaveLoss, type RcLoss } from '@/lib/core/snubber/rc-loss'
 import { nodeRiseTime, switchEdge } from '@/lib/core/snubber/switched-edge'
 
 import { expectWithin, input, referenceCases } from './reference-cases'
@@ -80,5 +81,34 @@ describe('one switched edge', () => {
           }
         : {}),
     })
+  })
+})
+
+// Source: the steady state of R and C alone, by Parseval's sum over the harmonics and by quadrature.
+describe('loss of a resistor and a capacitor in series', () => {
+  const outputs = ({ power, rmsCurrent, peakCurrent }: RcLoss) => ({
+    power,
+    i_rms: rmsCurrent,
+    i_peak: peakCurrent,
+  })
+
+  it.each(referenceCases(file, 'snubber.rc_dissipation_square'))('$id: $how_computed', (item) => {
+    const [rs, cs, v, f] = ['rs', 'cs', 'v', 'f'].map((key) => input(item, key)) as [
+      number,
+      number,
+      number,
+      number,
+    ]
+    expectWithin(item, outputs(squareWaveLoss(rs, cs, v, f, input(item, 'duty'))))
+  })
+
+  it.each(referenceCases(file, 'snubber.rc_dissipation_ramp'))('$id: $how_computed', (item) => {
+    const [rs, cs, v, f] = ['rs', 'cs', 'v', 'f'].map((key) => input(item, key)) as [
+      number,
+      number,
+      number,
+      number,
+    ]
+    expectWithin(item, outputs(settledEdgeLoss(rs, cs, v, f, input(item, 'edge_time_0_100'))))
   })
 })

@@ -3,6 +3,7 @@ import { main, step } from '../method/result-value'
 import { polesOf } from './modes'
 import { angularFrequency, characteristicImpedance, type SwitchNode } from './network'
 import { leastOvershootResistance, mostDampingResistance } from './optimum'
+import { squareWaveLoss } from './rc-loss'
 import type { EdgeOutcome } from './switched-edge'
 
 /** What to fit, and what it does to the waveform. */
@@ -18,7 +19,7 @@ export const chosenParts = (node: SwitchNode, overshootBefore: number, after: Ed
 export function losses(
   node: SwitchNode,
   after: EdgeOutcome,
-  step_: number,
+  voltage: number,
   frequency: number,
 ): ResultValue[] {
   const rs = node.snubber?.resistance ?? 0
@@ -31,12 +32,19 @@ export function losses(
       'Loss to size R_s for',
       '(C_s + C_par) V² f',
       'W',
-      (cs + node.capacitance) * step_ ** 2 * frequency,
+      (cs + node.capacitance) * voltage ** 2 * frequency,
     ),
     main('peakCurrent', 'Peak current in R_s', 'I_pk', 'A', after.snubberPeakCurrent),
     main('rmsCurrent', 'Rms current in R_s', 'I_rms', 'A', Math.sqrt(inResistor / rs)),
     step('lossInSeries', 'Loss in the series resistance', 'P_R', 'W', 2 * frequency * after.seriesEnergy),
-    step('popularLoss', 'Popular estimate of the loss', 'C_s V² f', 'W', cs * step_ ** 2 * frequency),
+    step(
+      'squareWaveLoss',
+      'Loss of R_s and C_s alone on a square wave, settled or not',
+      'P_RC',
+      'W',
+      squareWaveLoss(rs, cs, voltage, frequency).power,
+    ),
+    step('popularLoss', 'Popular estimate of the loss', 'C_s V² f', 'W', cs * voltage ** 2 * frequency),
   ]
 }
 
@@ -75,7 +83,7 @@ export function validityOf(node: SwitchNode, frequency: number, after: EdgeOutco
       passed: settled,
       sentence: settled
         ? 'The snubber settles within half a period (five time constants), as the loss formula needs.'
-        : 'The snubber does not settle within half a period; the loss is over-estimated and the next edge starts from a charged C_s.',
+        : 'The snubber does not settle within half a period; the loss is over-estimated, and the one of R_s and C_s alone on a square wave is nearer.',
     },
     {
       passed: calm,

@@ -23,6 +23,7 @@ export const rcSnubberTexts = {
     'k = C_s/C_par,   ρ = R_s/Z₀,   r = R/Z₀,   time in √(L_par C_par)',
     'Most damping, r = 0, k ≤ 8:   R_s = Z₀ (1 + k)^¾ / k,   ζ = (√(1 + k) − 1)/2',
     'Least overshoot: by search over the exact response to the edge',
+    'R_s and C_s alone, square wave: P = C_s V² f tanh(1/(4 f R_s C_s))',
     'P = 2 f ∫ i² R dt of the exact currents;   for an ideal step, all resistances: (C_s + C_par) V² f',
   ],
   notes: [
