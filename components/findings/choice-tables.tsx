@@ -3,6 +3,7 @@ import { formatQuantity } from '@/lib/core/units/format-quantity'
 
 import { DataTable, type Column } from '../ui/data-table'
 import { Sheet } from '../ui/sheet'
+import { MathText } from './math-text'
 
 type NumberedRow = { readonly index: number; readonly values: readonly number[] }
 
@@ -13,7 +14,7 @@ export const choiceColumns = (table: ChoiceTable): readonly Column<NumberedRow>[
   table.columns.map((column, position) => ({
     key: column.label,
     kind: 'number',
-    header: column.label,
+    header: <MathText>{column.label}</MathText>,
     value: (row) => formatQuantity(row.values[position] ?? Number.NaN, column.unit, 3),
   }))
 

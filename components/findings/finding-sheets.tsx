@@ -4,10 +4,10 @@ import type { FormAction } from '@/lib/core/action-state'
 import type { FindingDto } from '@/lib/domain/findings/finding-dto'
 import type { Recomputation } from '@/lib/domain/findings/recompute.service'
 
-import { Caution } from '../ui/caution'
 import { Sheet } from '../ui/sheet'
 import { FindingRun } from './finding-run'
 import { FindingText } from './finding-text'
+import { MethodCaution } from './method-caution'
 import { NextSteps } from './next-steps'
 
 type FindingSheetsProps = {
@@ -53,7 +53,7 @@ export const FindingSheets = ({ finding, recompute }: FindingSheetsProps) => (
         <FindingRun key={run.runId} run={run} position={position + 1} recompute={recompute} />
       ))}
     </section>
-    <Cautions finding={finding} />
+    <MethodCaution cautions={finding.runs.flatMap((run) => run.definition.cautions)} />
     <p className="max-w-measure text-sm text-ink-soft">
       These are engineering estimates on the evidence named, never a statement of conformity: that is for an
       accredited laboratory under the standard and edition in force. Local codes and licensed practice come
@@ -69,17 +69,3 @@ const Part = ({ title, children }: { readonly title: ReactNode; readonly childre
       <FindingText>{children}</FindingText>
     </div>
   )
-
-/** Each caution of the methods behind the finding, once. */
-const Cautions = ({ finding }: { readonly finding: FindingDto }) => {
-  const cautions = [...new Set(finding.runs.flatMap((run) => run.definition.cautions))]
-  return cautions.length === 0 ? null : (
-    <Caution title="Before you touch the board">
-      <ul>
-        {cautions.map((caution) => (
-          <li key={caution}>{caution}</li>
-        ))}
-      </ul>
-    </Caution>
-  )
-}

@@ -32,7 +32,7 @@ export const MeasureForm = ({ captures, chosenId, action }: MeasureFormProps) =>
       pendingLabel="Measuring…"
       label="Measure the ring of a capture"
     >
-      <div className="grid items-end gap-x-6 gap-y-4 sm:grid-cols-2">
+      <div className="grid items-end gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-4">
         <FormSelect
           name="evidenceId"
           label="Capture"

@@ -5,7 +5,7 @@ import { useState } from 'react'
 import type { InputDefinition } from '@/lib/core/method/method'
 
 import { FormQuantity, FormSelect, FormText } from '../forms/form-fields'
-import { SymbolText } from './symbol-text'
+import { SymbolText } from './math-text'
 
 export type OfferedResult = {
   /** "run:result", as the form sends it. */
@@ -53,7 +53,7 @@ export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }:
         name={name('tolerance')}
         label="±"
         aria-label={`Tolerance of ${definition.label}`}
-        placeholder={definition.usualTolerance ?? '5 %'}
+        placeholder={definition.usualTolerance ? `e.g. ${definition.usualTolerance}` : 'none'}
         autoComplete="off"
         className="num text-right"
       />
@@ -62,7 +62,7 @@ export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }:
           name={name('pick')}
           label="Take from"
           aria-label={`Take ${definition.label} from`}
-          placeholder="Typed at the left"
+          placeholder="Nowhere: typed"
           options={offered}
           value={pick}
           onChange={(event) => choose(event.currentTarget.value)}

@@ -6,9 +6,9 @@ type MethodListProps = {
 }
 
 export const MethodList = ({ base, methods }: MethodListProps) => (
-  <ul className="flex flex-col divide-y divide-rule">
+  <ul className="grid gap-x-8 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
     {methods.map(({ methodId, title, purpose }) => (
-      <li key={methodId} className="py-2.5 first:pt-0 last:pb-0">
+      <li key={methodId}>
         <TextLink href={`${base}/${methodId}`} className="font-semibold">
           {title}
         </TextLink>

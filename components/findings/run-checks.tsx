@@ -1,6 +1,7 @@
 import type { RunDto } from '@/lib/domain/findings/run-dto'
 
 import { StatusMark } from '../ui/status-mark'
+import { MathText } from './math-text'
 
 /** The limits of the model and of the measurement, as they were checked against this very run. */
 export const RunChecks = ({ run }: { readonly run: Pick<RunDto, 'validity' | 'warnings'> }) => (
@@ -12,7 +13,9 @@ export const RunChecks = ({ run }: { readonly run: Pick<RunDto, 'validity' | 'wa
         ) : (
           <StatusMark kind="over-limit">Does not hold</StatusMark>
         )}
-        <span className="max-w-measure">{sentence}</span>
+        <span className="max-w-measure">
+          <MathText>{sentence}</MathText>
+        </span>
       </li>
     ))}
     {run.warnings.map((warning) => (

@@ -4,7 +4,7 @@ import type { RunHeading } from '@/lib/domain/findings/run-dto'
 import { DataTable } from '../ui/data-table'
 import { TextLink } from '../ui/text-link'
 import { Timestamp } from '../ui/timestamp'
-import { SymbolText } from './symbol-text'
+import { SymbolText } from './math-text'
 
 /** The most telling results of a run in one line. */
 const mostShown = 3

@@ -29,27 +29,25 @@ export default async function BenchPage({
   const base = `/engagements/${engagementId}`
   return (
     <PageBody>
-      <div className="grid items-start gap-6 lg:grid-cols-2">
-        <Sheet title="Measure the ring of a capture">
-          {captures.length === 0 ? (
-            <div className="flex flex-col items-start gap-3">
-              <p className="text-ink-soft">
-                No capture has been read yet. Add one as delimited text, then measure it here.
-              </p>
-              <LinkButton href={`${base}/evidence`}>To the evidence</LinkButton>
-            </div>
-          ) : (
-            <MeasureForm
-              captures={captures}
-              chosenId={typeof capture === 'string' ? capture : undefined}
-              action={measureRing}
-            />
-          )}
-        </Sheet>
-        <Sheet title="Methods">
-          <MethodList base={`${base}/bench`} methods={methods} />
-        </Sheet>
-      </div>
+      <Sheet title="Measure the ring of a capture">
+        {captures.length === 0 ? (
+          <div className="flex flex-col items-start gap-3">
+            <p className="text-ink-soft">
+              No capture has been read yet. Add one as delimited text, then measure it here.
+            </p>
+            <LinkButton href={`${base}/evidence`}>To the evidence</LinkButton>
+          </div>
+        ) : (
+          <MeasureForm
+            captures={captures}
+            chosenId={typeof capture === 'string' ? capture : undefined}
+            action={measureRing}
+          />
+        )}
+      </Sheet>
+      <Sheet title="Methods">
+        <MethodList base={`${base}/bench`} methods={methods} />
+      </Sheet>
       {stored.length === 0 ? (
         <EmptyState title="No run yet">
           What is measured or computed here is kept as a run, with its inputs, where they came from, and every

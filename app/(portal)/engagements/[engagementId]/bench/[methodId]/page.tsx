@@ -1,8 +1,11 @@
 import type { Metadata } from 'next'
 
+import { FormulaList } from '@/components/findings/formula-list'
+import { MethodCaution } from '@/components/findings/method-caution'
 import { MethodForm } from '@/components/findings/method-form'
+import { NoteList } from '@/components/findings/note-list'
+import { SourceList } from '@/components/findings/source-list'
 import { PageBody } from '@/components/shell/page-body'
-import { Caution } from '@/components/ui/caution'
 import { Sheet } from '@/components/ui/sheet'
 import { TextLink } from '@/components/ui/text-link'
 import { runs } from '@/lib/server/operations'
@@ -27,22 +30,10 @@ export default async function MethodPage({ params, searchParams }: Props) {
   const aside = (
     <>
       <Sheet title="Formulas">
-        <ul className="flex flex-col gap-1.5">
-          {method.formulas.map((formula) => (
-            <li key={formula} className="num text-sm [overflow-wrap:anywhere]">
-              {formula}
-            </li>
-          ))}
-        </ul>
+        <FormulaList formulas={method.formulas} />
       </Sheet>
       <Sheet title="Sources">
-        <ul className="flex flex-col gap-1.5 text-sm">
-          {method.sources.map(({ citation, standing }) => (
-            <li key={citation}>
-              {citation} <span className="text-ink-faint">({standing})</span>
-            </li>
-          ))}
-        </ul>
+        <SourceList sources={method.sources} />
       </Sheet>
     </>
   )
@@ -66,19 +57,9 @@ export default async function MethodPage({ params, searchParams }: Props) {
         />
       </Sheet>
       <Sheet title="To know besides">
-        <ul className="flex max-w-measure list-disc flex-col gap-1 pl-5">
-          {method.notes.map((note) => (
-            <li key={note}>{note}</li>
-          ))}
-        </ul>
+        <NoteList notes={method.notes} />
       </Sheet>
-      <Caution title="Before you touch the board">
-        <ul>
-          {method.cautions.map((caution) => (
-            <li key={caution}>{caution}</li>
-          ))}
-        </ul>
-      </Caution>
+      <MethodCaution cautions={method.cautions} />
     </PageBody>
   )
 }
