@@ -5,7 +5,7 @@ import { useState } from 'react'
 import type { InputDefinition } from '@/lib/core/method/method'
 
 import { FormQuantity, FormSelect, FormText } from '../forms/form-fields'
-import { SymbolText } from './math-text'
+import { MathText, SymbolText } from './math-text'
 
 export type OfferedResult = {
   /** "run:result", as the form sends it. */
@@ -33,7 +33,7 @@ export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }:
     <div
       role="group"
       aria-label={definition.label}
-      className="grid items-end gap-x-4 gap-y-3 border-b border-rule pb-4 lg:grid-cols-[minmax(0,5fr)_minmax(0,2fr)_minmax(0,5fr)]"
+      className="grid grid-cols-[minmax(0,5fr)_minmax(0,3fr)] items-end gap-x-4 gap-y-3 border-b border-rule pb-4 lg:grid-cols-[minmax(0,5fr)_minmax(0,2fr)_minmax(0,5fr)]"
     >
       <FormQuantity
         name={name('text')}
@@ -42,7 +42,7 @@ export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }:
             {definition.label} <SymbolText symbol={definition.symbol} />
           </>
         }
-        hint={definition.help}
+        hint={<MathText>{definition.help}</MathText>}
         unit={picked ? '' : definition.unit}
         optional={!definition.isRequired}
         disabled={picked !== undefined}
@@ -57,19 +57,21 @@ export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }:
         autoComplete="off"
         className="num text-right"
       />
-      {offered.length > 0 ? (
-        <FormSelect
-          name={name('pick')}
-          label="Take from"
-          aria-label={`Take ${definition.label} from`}
-          placeholder="Nowhere: typed"
-          options={offered}
-          value={pick}
-          onChange={(event) => choose(event.currentTarget.value)}
-        />
-      ) : (
-        <p className="self-end pb-2 text-sm text-ink-faint">No run gives one yet.</p>
-      )}
+      <div className="col-span-2 lg:col-span-1">
+        {offered.length > 0 ? (
+          <FormSelect
+            name={name('pick')}
+            label="Take from"
+            aria-label={`Take ${definition.label} from`}
+            placeholder="Nowhere: typed"
+            options={offered}
+            value={pick}
+            onChange={(event) => choose(event.currentTarget.value)}
+          />
+        ) : (
+          <p className="text-sm lg:pb-2 text-ink-faint">No run gives one yet.</p>
+        )}
+      </div>
     </div>
   )
 }
