@@ -7,6 +7,7 @@ import { useEffect, useState } from 'react'
 import { z } from 'zod'
 
 import { Button } from '../ui/button'
+import { StatusMark } from '../ui/status-mark'
 
 const timerSchema = z
   .object({
@@ -31,8 +32,13 @@ async function fetchTimer() {
   return timer ? { ...timer, offset: timer.now - Date.now() } : null
 }
 
-/** The running timer in the header of every page: it survives a reload and warns when it runs long. */
-export const HeaderTimer = ({ initial }: { readonly initial: Timer | null }) => {
+type HeaderTimerProps = {
+  /** The timer as the server knew it when it wrote the page; null when none runs. */
+  readonly initial: Timer | null
+}
+
+/** The running timer in the header of every page: it survives a reload and warns after four hours. */
+export const HeaderTimer = ({ initial }: HeaderTimerProps) => {
   const client = useQueryClient()
   const router = useRouter()
   const { data: timer } = useQuery({
@@ -86,9 +92,9 @@ const Elapsed = ({ startedAt }: { readonly startedAt: number }) => {
   const seconds = Math.max(0, Math.floor((now - startedAt) / 1000))
   const isLong = seconds * 1000 >= longMilliseconds
   return (
-    <span className={isLong ? 'num font-semibold text-over-limit' : 'num'}>
-      {clockText(seconds)}
-      {isLong ? ' - still working?' : ''}
+    <span className="flex flex-wrap items-center gap-x-2">
+      <span className="num">{clockText(seconds)}</span>
+      {isLong ? <StatusMark kind="attention">Still working?</StatusMark> : null}
     </span>
   )
 }

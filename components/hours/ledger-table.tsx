@@ -1,6 +1,7 @@
 import { DataTable } from '../ui/data-table'
 import { Minutes } from '../ui/minutes'
 import { Timestamp } from '../ui/timestamp'
+import { ledgerKindLabel } from './ledger-kinds'
 
 type Movement = {
   readonly entryId: string
@@ -34,7 +35,7 @@ export const LedgerTable = ({ movements }: { readonly movements: readonly Moveme
           </>
         ),
       },
-      { key: 'kind', header: 'Kind', cell: (movement) => movement.kind },
+      { key: 'kind', header: 'Kind', cell: (movement) => ledgerKindLabel(movement.kind) },
       {
         key: 'minutes',
         header: 'Hours',

@@ -1,9 +1,8 @@
 import type { FormAction } from '@/lib/core/action-state'
 
 import { ActionForm } from '../forms/action-form'
-import { FormSelect, FormText } from '../forms/form-fields'
 import { Disclosure } from '../ui/disclosure'
-import { workKinds } from './work-kinds'
+import { TimeFields } from './time-fields'
 
 type ManualEntryFormProps = { readonly engagementId: string; readonly add: FormAction }
 
@@ -19,16 +18,7 @@ export const ManualEntryForm = ({ engagementId, add }: ManualEntryFormProps) => 
       label="Time by hand"
       doneMessage="Added to your drafts."
     >
-      <FormSelect
-        id="entry-kind"
-        name="workKind"
-        label="Kind of work"
-        options={workKinds}
-        placeholder="Choose"
-      />
-      <FormText id="entry-text" name="text" label="What was done" />
-      <FormText id="entry-start" name="startedAt" label="Begun (UTC)" type="datetime-local" />
-      <FormText id="entry-minutes" name="workedMinutes" label="Minutes worked" inputMode="numeric" />
+      <TimeFields idPrefix="entry" />
     </ActionForm>
   </Disclosure>
 )

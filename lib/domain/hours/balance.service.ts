@@ -3,7 +3,7 @@ import 'server-only'
 import { findCompany } from '@/db/repositories/company.repo'
 import { listBlocks, listLedger, type LedgerLine } from '@/db/repositories/hour-ledger.repo'
 import type { LedgerKind } from '@/db/tables/hours'
-import { authorize, notFound } from '@/lib/authz/authorize'
+import { authorize, isAllowed, notFound } from '@/lib/authz/authorize'
 import { balanceOf } from '@/lib/core/ledger/balance'
 import { minutes } from '@/lib/core/ledger/minutes'
 import { err, ok } from '@/lib/core/result'
@@ -14,7 +14,8 @@ import { openBlocks, spendableMinutes } from './open-blocks'
 
 /** A company's hours: what can be spent, its blocks, and every movement with the balance after it. */
 export const companyHours = operation('hours.companyHours', companyIdSchema, async (deps, actor, input) => {
-  const allowed = authorize(actor, 'hours.read', { kind: 'company', companyId: input.companyId })
+  const resource = { kind: 'company', companyId: input.companyId } as const
+  const allowed = authorize(actor, 'hours.read', resource)
   if (!allowed.ok) return allowed
   const company = await findCompany(deps.db, input.companyId)
   if (!company) return err(notFound)
@@ -24,6 +25,11 @@ export const companyHours = operation('hours.companyHours', companyIdSchema, asy
   const ledger = await listLedger(deps.db, input.companyId)
   return ok({
     companyName: company.name,
+    /** The steps that are open to the reader. */
+    may: {
+      buy: isAllowed(actor, 'purchase.start', resource),
+      readPurchases: isAllowed(actor, 'purchase.read', resource),
+    },
     balanceMinutes: balanceOf(ledger.map((entry) => ({ minutes: minutes(entry.minutes) }))),
     spendableMinutes: spendableMinutes(open, now),
     blocks: rows.map((row) => ({

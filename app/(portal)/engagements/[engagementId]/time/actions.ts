@@ -7,6 +7,8 @@ export const startTimer = action(timers.startTimer)
 
 export const addTime = action(timeDrafts.addTime)
 
+export const editTime = action(timeDrafts.editTime)
+
 export const discardTime = action(timeDrafts.discardTime)
 
 export const postTime = action(posting.postTime)

@@ -11,7 +11,7 @@ import { Sheet } from '@/components/ui/sheet'
 import { posting } from '@/lib/server/operations'
 import { query } from '@/lib/server/query'
 
-import { addTime, discardTime, postTime, startTimer } from './actions'
+import { addTime, discardTime, editTime, postTime, startTimer } from './actions'
 
 export const metadata: Metadata = { title: 'Time' }
 
@@ -29,7 +29,11 @@ export default async function TimePage({ params }: PageProps<'/engagements/[enga
     >
       {time.mayTrack ? (
         <>
-          <DraftList drafts={time.drafts} post={postTime} discard={discardTime} />
+          <DraftList
+            drafts={time.drafts}
+            room={time}
+            actions={{ post: postTime, edit: editTime, discard: discardTime }}
+          />
           <ManualEntryForm engagementId={engagementId} add={addTime} />
         </>
       ) : null}
