@@ -11,6 +11,22 @@ export function run(program, args, options = {}) {
   })
 }
 
+/** As `run`, but shows what the program said only when it fails. */
+export function runQuietly(program, args, options = {}) {
+  return new Promise((resolve, reject) => {
+    const child = spawn(program, args, { ...options, stdio: ['ignore', 'pipe', 'pipe'] })
+    const said = []
+    child.stdout.on('data', (part) => said.push(part))
+    child.stderr.on('data', (part) => said.push(part))
+    child.once('error', reject)
+    child.once('exit', (code, signal) => {
+      if (code === 0) return resolve()
+      process.stderr.write(Buffer.concat(said))
+      reject(new Error(`${program} ${args.join(' ')} ended with ${code ?? signal}`))
+    })
+  })
+}
+
 /** Runs a program of node_modules/.bin. */
 export const runBin = (name, args, options) => run(`node_modules/.bin/${name}`, args, options)
 
