@@ -14,7 +14,7 @@ export default defineConfig({
     include: ['tests/{unit,reference,integration,security}/**/*.test.{ts,tsx}'],
     setupFiles: ['tests/support/fail-on-console-error.ts'],
     server: { deps: { inline: ['kysely'] } },
-    testTimeout: 30_000,
+    testTimeout: 60_000,
     hookTimeout: 60_000,
     maxWorkers: 2,
   },
