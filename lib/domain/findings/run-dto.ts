@@ -136,7 +136,10 @@ function inputsOf(
   return [...given, ...proposed.map(({ key, value }) => inputOf(key, value, 'Proposed by the method', null))]
 }
 
-const originOf = (input: InputValue, unit: Unit, creator: string): string =>
-  input.by === 'run'
-    ? `${input.resultLabel} ${input.resultSymbol} of run ${input.runNumber}, ${input.runTitle}`
-    : `Typed by ${creator} as “${input.text}”${unit === '' ? '' : `, that is ${exactQuantityText(input.value, unit)}`}`
+function originOf(input: InputValue, unit: Unit, creator: string): string {
+  if (input.by === 'run') {
+    return `${input.resultLabel} ${input.resultSymbol} of run ${input.runNumber}, ${input.runTitle}`
+  }
+  const exact = exactQuantityText(input.value, unit)
+  return `Typed by ${creator} as “${input.text}”${exact === input.text ? '' : `, that is ${exact}`}`
+}
