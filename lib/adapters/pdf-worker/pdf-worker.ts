@@ -10,7 +10,12 @@ import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
 const timeLimitMilliseconds = 60_000
 const heapLimitMebibytes = 768
 
-const fontFile = path.join(/* turbopackIgnore: true */ process.cwd(), 'pdf', 'fonts', 'SourceSans3-Regular.ttf')
+const fontFile = path.join(
+  /* turbopackIgnore: true */ process.cwd(),
+  'pdf',
+  'fonts',
+  'SourceSans3-Regular.ttf',
+)
 
 const area = z.object({
   page: z.int().nonnegative(),
