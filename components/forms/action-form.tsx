@@ -42,7 +42,15 @@ export const ActionForm = (props: ActionFormProps) => {
 
   return (
     <FormState.Provider value={state}>
-      <form id={id} onSubmit={send} aria-label={props.label} noValidate className="flex flex-col gap-4">
+      {/* Until the script has loaded the browser sends by itself: by POST, so that no entry ends up in an address. */}
+      <form
+        id={id}
+        method="post"
+        onSubmit={send}
+        aria-label={props.label}
+        noValidate
+        className="flex flex-col gap-4"
+      >
         {Object.entries(props.hidden ?? {}).map(([name, value]) => (
           <input key={name} type="hidden" name={name} value={value} />
         ))}
