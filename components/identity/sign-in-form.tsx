@@ -38,7 +38,7 @@ export const SignInForm = () => {
   }
 
   return (
-    <form onSubmit={(event) => void send(event)} noValidate className="flex flex-col gap-4">
+    <form method="post" onSubmit={(event) => void send(event)} noValidate className="flex flex-col gap-4">
       {problem ? <FormErrorSummary title="Not signed in." errors={[{ message: problem }]} /> : null}
       <TextField name="email" label="E-mail address" type="email" autoComplete="username" />
       <TextField name="password" label="Password" type="password" autoComplete="current-password" />
