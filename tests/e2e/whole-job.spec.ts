@@ -42,7 +42,7 @@ test('the whole job, from the invitation to books that agree', async ({ browser,
     await join(pages.purchaser, request, purchaser)
   })
 
-  await test.step('the purchaser buys hours, opens an engagement and sends two captures', async () => {
+  await test.step('the purchaser buys hours by card', async () => {
     await buyTenHours(pages.purchaser, request, purchaser)
   })
 

@@ -74,7 +74,7 @@ export async function assignConsultants(
   await page.goto(engagement)
   for (const name of names) {
     const form = page.getByRole('form', { name: 'Assign a consultant' })
-    if (!(await form.isVisible())) await page.getByText('Assign a consultant').first().click()
+    if (!(await form.isVisible())) await page.locator('summary', { hasText: 'Assign a consultant' }).click()
     await form.getByLabel('Person').selectOption({ label: name })
     await form.getByRole('button', { name: 'Assign a consultant' }).click()
     await expect(page.getByRole('listitem').filter({ hasText: name }).first()).toBeVisible()
