@@ -1,5 +1,5 @@
+import { LedgerMinutes } from '../hours/ledger-minutes'
 import { DataTable } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
 import { TextLink } from '../ui/text-link'
 import { CheckList, type Check } from './check-list'
 
@@ -25,26 +25,28 @@ export const AccountTable = ({ accounts }: { readonly accounts: readonly Account
         header: 'Client',
         isRowHeader: true,
         cell: (account) => (
-          <TextLink href={`/companies/${account.companyId}/hours`}>{account.companyName}</TextLink>
+          <span className="block min-w-36">
+            <TextLink href={`/companies/${account.companyId}/hours`}>{account.companyName}</TextLink>
+          </span>
         ),
       },
       {
         key: 'credit',
         header: 'Credited',
         align: 'end',
-        cell: (account) => <Minutes minutes={account.creditedMinutes} />,
+        cell: (account) => <LedgerMinutes minutes={account.creditedMinutes} />,
       },
       {
         key: 'debit',
         header: 'Debited',
         align: 'end',
-        cell: (account) => <Minutes minutes={account.debitedMinutes} />,
+        cell: (account) => <LedgerMinutes minutes={account.debitedMinutes} />,
       },
       {
         key: 'balance',
         header: 'Balance',
         align: 'end',
-        cell: (account) => <Minutes minutes={account.balanceMinutes} />,
+        cell: (account) => <LedgerMinutes minutes={account.balanceMinutes} />,
       },
       { key: 'checks', header: 'Checks', cell: (account) => <CheckList checks={account.checks} /> },
     ]}

@@ -1,5 +1,5 @@
+import { LedgerMinutes } from '../hours/ledger-minutes'
 import { DataTable } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
 import { moneyDigits } from '../ui/money'
 import { StatusMark } from '../ui/status-mark'
 
@@ -24,8 +24,18 @@ export const CatalogueTable = ({ offers }: { readonly offers: readonly Offer[] }
     rows={offers}
     rowKey={(offer) => offer.offerId}
     columns={[
-      { key: 'title', header: 'Block', cell: (offer) => offer.title, isRowHeader: true },
-      { key: 'hours', header: 'Hours', align: 'end', cell: (offer) => <Minutes minutes={offer.minutes} /> },
+      {
+        key: 'title',
+        header: 'Block',
+        isRowHeader: true,
+        cell: (offer) => <span className="block min-w-36">{offer.title}</span>,
+      },
+      {
+        key: 'hours',
+        header: 'Hours',
+        align: 'end',
+        cell: (offer) => <LedgerMinutes minutes={offer.minutes} />,
+      },
       {
         key: 'net',
         header: 'Net',

@@ -12,24 +12,29 @@ const marks: Record<Check['state'], StatusKind> = {
   differs: 'over-limit',
 }
 
+const tones: Record<Check['state'], string> = {
+  agrees: 'text-ink-soft',
+  pending: 'text-ink-soft',
+  differs: 'text-over-limit',
+}
+
+type CheckListProps = {
+  readonly checks: readonly Check[]
+  /** Say also of those that agree what was compared. */
+  readonly isExplained?: boolean
+}
+
 /** What must hold between two books: a mark for each, and the reason where one does not agree (yet). */
-export const CheckList = ({ checks }: { readonly checks: readonly Check[] }) => (
+export const CheckList = ({ checks, isExplained = false }: CheckListProps) => (
   <ul className="flex flex-wrap gap-x-4 gap-y-0.5">
-    {checks.map((check) => (
-      <li key={check.name} className={check.state === 'agrees' ? undefined : 'basis-full'}>
-        <StatusMark kind={marks[check.state]}>{check.name}</StatusMark>
-        {check.state === 'agrees' ? (
-          <span className="sr-only">: {check.sentence}</span>
-        ) : (
-          <span
-            className={
-              check.state === 'differs' ? 'block text-sm text-over-limit' : 'block text-sm text-ink-soft'
-            }
-          >
-            {check.sentence}
-          </span>
-        )}
-      </li>
-    ))}
+    {checks.map(({ name, state, sentence }) => {
+      const isShown = isExplained || state !== 'agrees'
+      return (
+        <li key={name} className={isShown ? 'basis-full' : undefined}>
+          <StatusMark kind={marks[state]}>{name}</StatusMark>
+          <span className={isShown ? `block text-sm ${tones[state]}` : 'sr-only'}>{sentence}</span>
+        </li>
+      )
+    })}
   </ul>
 )

@@ -4,6 +4,7 @@ import { ActionForm } from '../forms/action-form'
 import { DescriptionList } from '../ui/description-list'
 import { Minutes } from '../ui/minutes'
 import { Money } from '../ui/money'
+import { Quantity } from '../ui/quantity'
 import { Sheet } from '../ui/sheet'
 
 type Offer = {
@@ -33,7 +34,10 @@ export const OfferList = ({ companyId, offers, buy }: OfferListProps) => (
           <DescriptionList
             items={[
               { term: 'Hours', detail: <Minutes minutes={offer.minutes} /> },
-              { term: 'Valid for', detail: `${offer.validityMonths} months` },
+              {
+                term: 'Valid for',
+                detail: <Quantity value={String(offer.validityMonths)} unit="months" />,
+              },
               { term: 'Net', detail: <Money cents={offer.netCents} currency={offer.currency} /> },
               { term: offer.taxLabel, detail: <Money cents={offer.taxCents} currency={offer.currency} /> },
               {

@@ -5,6 +5,7 @@ import { useQuery } from '@tanstack/react-query'
 import type { FormAction } from '@/lib/core/action-state'
 
 import { ActionForm } from '../forms/action-form'
+import { PageBody } from '../shell/page-body'
 import { LinkButton } from '../ui/link-button'
 import { Sheet } from '../ui/sheet'
 import { fetchPurchase, type PurchaseAnswer } from './purchase-answer'
@@ -31,7 +32,13 @@ export const PurchaseProgress = ({ initial, begin }: PurchaseProgressProps) => {
   const { companyId, offerId, standing } = purchase
   const isLost = standing === 'failed' || standing === 'expired'
   return (
-    <>
+    <PageBody
+      aside={
+        <Sheet title="What was ordered">
+          <PurchaseFacts purchase={purchase} />
+        </Sheet>
+      }
+    >
       <PurchaseOutcome purchase={purchase} isSilent={isRefetchError} />
       {standing === 'not_begun' ? (
         <ActionForm
@@ -54,9 +61,6 @@ export const PurchaseProgress = ({ initial, begin }: PurchaseProgressProps) => {
           </LinkButton>
         )}
       </div>
-      <Sheet title="What was ordered">
-        <PurchaseFacts purchase={purchase} />
-      </Sheet>
-    </>
+    </PageBody>
   )
 }

@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react'
 
+import { LedgerMinutes } from '../hours/ledger-minutes'
 import { DataTable, type Column } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
-import { Money, moneyDigits } from '../ui/money'
+import { DecimalCell } from '../ui/decimal-cell'
+import { moneyDigits } from '../ui/money'
 import { dayInWords } from '../ui/timestamp'
 import { CheckList, type Check } from './check-list'
 import { PurchaseState, type PurchaseStatus } from './purchase-state'
@@ -46,7 +47,12 @@ const moneyColumn = (header: string, key: 'grossCents' | 'feeCents' | 'netCents'
 const minutesColumn = (
   header: string,
   key: 'creditedMinutes' | 'debitedMinutes' | 'remainingMinutes',
-): Column<PurchaseLine> => ({ key, header, align: 'end', cell: (line) => <Minutes minutes={line[key]} /> })
+): Column<PurchaseLine> => ({
+  key,
+  header,
+  align: 'end',
+  cell: (line) => <LedgerMinutes minutes={line[key]} />,
+})
 
 const columns: readonly Column<PurchaseLine>[] = [
   {
@@ -54,16 +60,14 @@ const columns: readonly Column<PurchaseLine>[] = [
     header: 'Purchase',
     isRowHeader: true,
     cell: (line) => (
-      <>
+      <span className="block min-w-44">
         {line.companyName}
+        <span className="block text-sm font-normal text-ink-soft">{line.title}</span>
         <span className="block text-sm font-normal text-ink-soft">
-          {line.title}
-          {line.receiptNumber === null ? '' : `, receipt ${line.receiptNumber}`}
-        </span>
-        <span className="block text-sm font-normal text-ink-soft">
+          {line.receiptNumber === null ? 'No receipt' : `Receipt ${line.receiptNumber}`},{' '}
           {dayInWords(line.paidAt ?? line.createdAt)}
         </span>
-      </>
+      </span>
     ),
   },
   moneyColumn('Paid', 'grossCents'),
@@ -84,6 +88,11 @@ const columns: readonly Column<PurchaseLine>[] = [
   },
 ]
 
+/** Set like the amounts above it, so that the decimals line up. */
+const Sum = ({ cents, currency }: { readonly cents: number; readonly currency: string }) => (
+  <DecimalCell figures={{ number: moneyDigits(cents), unit: currency }} fit={{ tail: 3, unit: 3 }} />
+)
+
 /** Each purchase with its money and its hours side by side, and their sums. */
 export const PurchaseTable = ({ purchases, totals }: PurchaseTableProps) => {
   const stacked = (cell: (sums: Sums) => ReactNode) =>
@@ -101,12 +110,12 @@ export const PurchaseTable = ({ purchases, totals }: PurchaseTableProps) => {
       columns={columns}
       footer={[
         'Sum',
-        stacked((sums) => <Money cents={sums.grossCents} currency={sums.currency} />),
-        stacked((sums) => <Money cents={sums.feeCents} currency={sums.currency} />),
-        stacked((sums) => <Money cents={sums.netCents} currency={sums.currency} />),
-        stacked((sums) => <Minutes minutes={sums.creditedMinutes} />),
-        stacked((sums) => <Minutes minutes={sums.debitedMinutes} />),
-        stacked((sums) => <Minutes minutes={sums.remainingMinutes} />),
+        stacked((sums) => <Sum cents={sums.grossCents} currency={sums.currency} />),
+        stacked((sums) => <Sum cents={sums.feeCents} currency={sums.currency} />),
+        stacked((sums) => <Sum cents={sums.netCents} currency={sums.currency} />),
+        stacked((sums) => <LedgerMinutes minutes={sums.creditedMinutes} />),
+        stacked((sums) => <LedgerMinutes minutes={sums.debitedMinutes} />),
+        stacked((sums) => <LedgerMinutes minutes={sums.remainingMinutes} />),
         '',
       ]}
     />

@@ -1,5 +1,5 @@
+import { LedgerMinutes } from '../hours/ledger-minutes'
 import { DataTable } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
 import { moneyDigits } from '../ui/money'
 import { TextLink } from '../ui/text-link'
 import { Timestamp } from '../ui/timestamp'
@@ -45,7 +45,7 @@ export const ReceiptTable = ({ purchases }: { readonly purchases: readonly Purch
         key: 'hours',
         header: 'Hours',
         align: 'end',
-        cell: (purchase) => <Minutes minutes={purchase.minutes} />,
+        cell: (purchase) => <LedgerMinutes minutes={purchase.minutes} />,
       },
       {
         key: 'gross',

@@ -1,7 +1,7 @@
 import { DataTable } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
 import { StatusMark } from '../ui/status-mark'
 import { Timestamp } from '../ui/timestamp'
+import { LedgerMinutes } from './ledger-minutes'
 
 type Block = {
   readonly blockId: string
@@ -29,9 +29,24 @@ export const BlockTable = ({ blocks }: { readonly blocks: readonly Block[] }) =>
     rows={blocks}
     rowKey={(block) => block.blockId}
     columns={[
-      { key: 'title', header: 'Block', cell: (block) => block.title, isRowHeader: true },
-      { key: 'bought', header: 'Bought', align: 'end', cell: (block) => <Minutes minutes={block.minutes} /> },
-      { key: 'left', header: 'Left', align: 'end', cell: (block) => <Minutes minutes={block.remaining} /> },
+      {
+        key: 'title',
+        header: 'Block',
+        cell: (block) => <span className="block min-w-24">{block.title}</span>,
+        isRowHeader: true,
+      },
+      {
+        key: 'bought',
+        header: 'Bought',
+        align: 'end',
+        cell: (block) => <LedgerMinutes minutes={block.minutes} />,
+      },
+      {
+        key: 'left',
+        header: 'Left',
+        align: 'end',
+        cell: (block) => <LedgerMinutes minutes={block.remaining} />,
+      },
       {
         key: 'until',
         header: 'Valid until',

@@ -59,6 +59,7 @@ export const DraftEntry = ({ draft, actions, obstacle }: DraftEntryProps) => {
           submitLabel={`Post ${minutesInWords(draft.minutes)}`}
           pendingLabel="Posting…"
           size="small"
+          tone={obstacle === null ? 'primary' : 'plain'}
           label={`Post: ${text}`}
         />
         <ActionForm

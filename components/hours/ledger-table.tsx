@@ -1,7 +1,7 @@
 import { DataTable } from '../ui/data-table'
-import { Minutes } from '../ui/minutes'
 import { Timestamp } from '../ui/timestamp'
 import { ledgerKindLabel } from './ledger-kinds'
+import { LedgerMinutes } from './ledger-minutes'
 
 type Movement = {
   readonly entryId: string
@@ -21,32 +21,31 @@ export const LedgerTable = ({ movements }: { readonly movements: readonly Moveme
     rows={movements}
     rowKey={(movement) => movement.entryId}
     columns={[
-      { key: 'at', header: 'When', cell: (movement) => <Timestamp instant={movement.at} /> },
+      { key: 'at', header: 'When', cell: (movement) => <Timestamp instant={movement.at} dayOnly /> },
       {
         key: 'text',
         header: 'What',
         isRowHeader: true,
         cell: (movement) => (
-          <>
+          <span className="block min-w-48 [overflow-wrap:anywhere]">
             {movement.text}
-            {movement.engagement ? (
-              <span className="block text-sm font-normal text-ink-soft">{movement.engagement}</span>
-            ) : null}
-          </>
+            <span className="block text-sm font-normal text-ink-soft">
+              {[ledgerKindLabel(movement.kind), movement.engagement].filter(Boolean).join(', ')}
+            </span>
+          </span>
         ),
       },
-      { key: 'kind', header: 'Kind', cell: (movement) => ledgerKindLabel(movement.kind) },
       {
         key: 'minutes',
         header: 'Hours',
         align: 'end',
-        cell: (movement) => <Minutes minutes={movement.minutes} />,
+        cell: (movement) => <LedgerMinutes minutes={movement.minutes} />,
       },
       {
         key: 'balance',
         header: 'Balance',
         align: 'end',
-        cell: (movement) => <Minutes minutes={movement.balance} />,
+        cell: (movement) => <LedgerMinutes minutes={movement.balance} />,
       },
     ]}
   />

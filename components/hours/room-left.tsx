@@ -1,6 +1,6 @@
 import { DescriptionList } from '../ui/description-list'
-import { Minutes } from '../ui/minutes'
 import { Sheet } from '../ui/sheet'
+import { LedgerMinutes } from './ledger-minutes'
 
 type RoomLeftProps = {
   readonly capMinutes: number | null
@@ -15,13 +15,13 @@ export const RoomLeft = ({ capMinutes, postedMinutes, spendableMinutes }: RoomLe
       items={[
         {
           term: 'Approved cap',
-          detail: capMinutes === null ? 'No scope is approved yet' : <Minutes minutes={capMinutes} />,
+          detail: capMinutes === null ? 'No scope is approved yet' : <LedgerMinutes minutes={capMinutes} />,
         },
-        { term: 'Posted', detail: <Minutes minutes={postedMinutes} /> },
+        { term: 'Posted', detail: <LedgerMinutes minutes={postedMinutes} /> },
         ...(capMinutes === null
           ? []
-          : [{ term: 'Left under the cap', detail: <Minutes minutes={capMinutes - postedMinutes} /> }]),
-        { term: 'Hours of the client', detail: <Minutes minutes={spendableMinutes} /> },
+          : [{ term: 'Left under the cap', detail: <LedgerMinutes minutes={capMinutes - postedMinutes} /> }]),
+        { term: 'Hours of the client', detail: <LedgerMinutes minutes={spendableMinutes} /> },
       ]}
     />
   </Sheet>

@@ -1,5 +1,4 @@
 import { FormSelect, FormText } from '../forms/form-fields'
-import { FieldGroup } from '../ui/field-group'
 import { workKinds } from './work-kinds'
 
 type TimeFieldsProps = {
@@ -17,7 +16,7 @@ const localMinute = (instant: number): string => new Date(instant).toISOString()
 
 /** What was done, when and for how long. */
 export const TimeFields = ({ idPrefix, start }: TimeFieldsProps) => (
-  <FieldGroup legend="The work" columns={2}>
+  <div className="field-grid sm:grid-cols-2">
     <FormSelect
       id={`${idPrefix}-kind`}
       name="workKind"
@@ -47,5 +46,5 @@ export const TimeFields = ({ idPrefix, start }: TimeFieldsProps) => (
       inputMode="numeric"
       defaultValue={start ? Math.ceil(start.workedSeconds / 60) : undefined}
     />
-  </FieldGroup>
+  </div>
 )

@@ -62,17 +62,17 @@ export default async function BooksPage() {
             <>
               <PurchaseTable purchases={moved} totals={totals} />
               <div className="border-t border-rule px-4 py-2.5 sm:px-5">
-                <CheckList checks={overview.checks} />
+                <CheckList checks={overview.checks} isExplained />
               </div>
             </>
           )}
         </Sheet>
         {unpaid.length > 0 ? (
-          <Disclosure summary={`Begun and not paid (${unpaid.length})`}>
-            <Sheet flush>
+          <Sheet>
+            <Disclosure summary={`Begun and not paid (${unpaid.length})`}>
               <UnpaidTable purchases={unpaid} />
-            </Sheet>
-          </Disclosure>
+            </Disclosure>
+          </Sheet>
         ) : null}
         <Sheet title="Catalogue" flush={offers.length > 0}>
           {offers.length === 0 ? (

@@ -1,7 +1,6 @@
 import type { Metadata } from 'next'
 
 import { PurchaseProgress } from '@/components/billing/purchase-progress'
-import { PageBody } from '@/components/shell/page-body'
 import { PageHeader } from '@/components/shell/page-header'
 import { purchases } from '@/lib/server/operations'
 import { query } from '@/lib/server/query'
@@ -19,9 +18,7 @@ export default async function PurchasePage({ params }: PageProps<'/purchases/[pu
         title="Your purchase"
         crumbs={[{ label: 'Hours', href: `/companies/${purchase.companyId}/hours` }, { label: 'Purchase' }]}
       />
-      <PageBody>
-        <PurchaseProgress initial={purchase} begin={startCheckout} />
-      </PageBody>
+      <PurchaseProgress initial={purchase} begin={startCheckout} />
     </>
   )
 }
