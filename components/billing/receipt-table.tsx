@@ -34,7 +34,11 @@ export const ReceiptTable = ({ purchases }: { readonly purchases: readonly Purch
         key: 'title',
         header: 'Block',
         isRowHeader: true,
-        cell: (purchase) => <TextLink href={`/purchases/${purchase.purchaseId}`}>{purchase.title}</TextLink>,
+        cell: (purchase) => (
+          <span className="block min-w-24">
+            <TextLink href={`/purchases/${purchase.purchaseId}`}>{purchase.title}</TextLink>
+          </span>
+        ),
       },
       {
         key: 'paid',

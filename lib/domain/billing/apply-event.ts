@@ -4,6 +4,8 @@ import type { Tx } from '@/db/client'
 import { claimEffect } from '@/db/repositories/provider-event.repo'
 import { findPurchase, movePurchase, type PurchaseRow } from '@/db/repositories/purchase.repo'
 import type { ProviderEventOutcome, PurchaseStatus } from '@/db/tables/billing'
+import { cents } from '@/lib/core/money/cents'
+import { moneyText } from '@/lib/core/money/format-money'
 import { err, ok, type Result } from '@/lib/core/result'
 import type { Checkout, ProviderEvent } from '@/lib/ports/payments'
 
@@ -109,7 +111,8 @@ function differenceOf(purchase: PurchaseRow, checkout: Checkout): string | null 
     return `Purchase ${purchase.id} has another checkout than ${checkout.sessionId}`
   }
   if (amount !== purchase.gross_cents || currency !== purchase.currency) {
-    return `The provider says ${amount ?? 'no amount'} ${currency ?? ''}, our price is ${purchase.gross_cents} ${purchase.currency} (cents)`
+    const told = amount === null ? 'no amount' : moneyText(cents(amount), currency ?? 'of no currency')
+    return `The provider says ${told}, our price is ${moneyText(cents(purchase.gross_cents), purchase.currency)}`
   }
   if (checkout.metadata['company_id'] !== purchase.company_id) {
     return `The provider names another company for purchase ${purchase.id}`

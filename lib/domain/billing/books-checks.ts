@@ -137,7 +137,7 @@ export function receiptCheck(receiptNumbers: readonly number[], payments: number
   return check(
     'Receipts',
     isGapFree && receiptNumbers.length === payments,
-    payments === 0 ? 'No receipt yet' : `Receipts 1 to ${payments} without a gap, one for each payment`,
+    `Numbered from 1 without a gap, one for each of ${payments} ${payments === 1 ? 'payment' : 'payments'}`,
     `${receiptNumbers.length} receipts for ${payments} payments, or a number is missing`,
   )
 }
