@@ -67,6 +67,26 @@ describe('the timer', () => {
     ])
   })
 
+  it('leaves a draft that can be corrected at once, though its seconds are typed as whole minutes', async () => {
+    portal.clock.advance(1_700)
+    valueOf(await start(osterby.consultant))
+    portal.clock.advance(10_900)
+    const { timeEntryId } = valueOf(await stop(osterby.consultant))
+    const change = { timeEntryId, ...work, startedAt: '2026-12-01T09:00', workedMinutes: '1' }
+    expect((await editTime.execute(portal.deps, osterby.consultant, change)).ok).toBe(true)
+  })
+
+  it('started right after another was stopped does not overlap with it', async () => {
+    await approveTestScope(portal, osterby)
+    await creditTestBlock(portal, osterby.companyId)
+    for (let round = 0; round < 2; round += 1) {
+      valueOf(await start(osterby.consultant))
+      portal.clock.advance(10_900)
+      const { timeEntryId } = valueOf(await stop(osterby.consultant))
+      expect((await post(timeEntryId)).ok).toBe(true)
+    }
+  })
+
   it('is one for each person: a second start is refused and names the running one', async () => {
     valueOf(await start(osterby.consultant))
     expect(await start(osterby.consultant)).toMatchObject({

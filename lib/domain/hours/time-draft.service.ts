@@ -86,6 +86,8 @@ export async function ownDraft(
   return row.posted_at === null ? ok({ row, engagement: engagement.value }) : err(alreadyPosted)
 }
 
+const minute = 60_000
+
 type Span = { readonly startedAt: number; readonly workedMinutes: number }
 
 /** Whether a span lies in the past and shares no time with another entry of the person. */
@@ -96,8 +98,9 @@ async function freeSpan(
   span: Span,
   exceptId?: string,
 ): Promise<Result<true, HoursError>> {
-  const to = span.startedAt + span.workedMinutes * 60_000
-  if (to > deps.clock.now()) return err(notInThePast)
+  const to = span.startedAt + span.workedMinutes * minute
+  // What is typed has whole minutes: the minute that is running counts as worked.
+  if (to > Math.ceil(deps.clock.now() / minute) * minute) return err(notInThePast)
   const among = exceptId === undefined ? {} : { exceptId }
   const other = await findOverlap(tx, { personId: actor.personId, from: span.startedAt, to }, among)
   return other ? err(overlapWith(other)) : ok(true)

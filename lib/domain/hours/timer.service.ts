@@ -49,7 +49,8 @@ export const stopTimer = operation('hours.stopTimer', noInput, async (deps, acto
     const timer = await findTimer(tx, actor.personId)
     if (!timer) return err(noTimer)
     const now = deps.clock.now()
-    const seconds = Math.max(1, Math.round((now - timer.started_at) / 1000))
+    // Rounded down, so that the next timer never begins within this one.
+    const seconds = Math.max(1, Math.floor((now - timer.started_at) / 1000))
     const timeEntryId = deps.ids.newId()
     await insertTimeEntry(tx, {
       id: timeEntryId,
