@@ -2,6 +2,7 @@ import type { Metadata, Viewport } from 'next'
 import { cookies, headers } from 'next/headers'
 import type { ReactNode } from 'react'
 
+import { CspNonce } from '@/components/shell/csp-nonce'
 import { themeCookie } from '@/components/shell/theme-cookie'
 
 import { fontVariables } from './fonts'
@@ -26,8 +27,7 @@ export default async function RootLayout({ children }: { readonly children: Reac
   return (
     <html lang="en" className={fontVariables} data-theme={chosen}>
       <head>
-        {/* react-aria adds one style element of its own and reads the nonce for it here. */}
-        <meta property="csp-nonce" nonce={nonce} />
+        <CspNonce nonce={nonce} />
       </head>
       <body>{children}</body>
     </html>

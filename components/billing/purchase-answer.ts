@@ -1,4 +1,4 @@
-import { z } from 'zod'
+import { z } from '../shell/plain-zod'
 
 /** How a purchase stands, as the interface tells it. */
 export const purchaseAnswer = z.object({

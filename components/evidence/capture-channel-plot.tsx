@@ -2,11 +2,11 @@
 
 import { keepPreviousData, useQuery } from '@tanstack/react-query'
 import { useState } from 'react'
-import { z } from 'zod'
 
 import { CapturePlot } from '../charts/capture-plot'
 import { Notice } from '../ui/notice'
 import { Skeleton } from '../ui/skeleton'
+import { z } from '../shell/plain-zod'
 
 const points = z.object({ x: z.array(z.number()), min: z.array(z.number()), max: z.array(z.number()) })
 const problem = z.object({ title: z.string() })

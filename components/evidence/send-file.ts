@@ -1,6 +1,5 @@
-import { z } from 'zod'
-
 import type { UploadState } from './upload-state'
+import { z } from '../shell/plain-zod'
 
 const received = z.object({
   evidenceId: z.string(),

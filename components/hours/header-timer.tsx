@@ -4,10 +4,10 @@ import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query'
 import Link from 'next/link'
 import { useRouter } from 'next/navigation'
 import { useEffect, useState } from 'react'
-import { z } from 'zod'
 
 import { Button } from '../ui/button'
 import { StatusMark } from '../ui/status-mark'
+import { z } from '../shell/plain-zod'
 
 const timerSchema = z
   .object({

@@ -1,12 +1,12 @@
 'use client'
 
 import { useContext } from 'react'
-import { z } from 'zod'
 
 import { FormState } from '../forms/form-state'
 import { DescriptionList } from '../ui/description-list'
 import { Hash } from '../ui/hash'
 import { Timestamp } from '../ui/timestamp'
+import { z } from '../shell/plain-zod'
 
 const answerSchema = z.object({
   number: z.string(),

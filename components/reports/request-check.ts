@@ -1,4 +1,4 @@
-import { z } from 'zod'
+import { z } from '../shell/plain-zod'
 
 const answerSchema = z.object({
   outcome: z.enum(['valid', 'invalid', 'unknown']),
