@@ -284,6 +284,15 @@ describe('posting', () => {
     })
   })
 
+  it.each([
+    ['0:35', false],
+    ['0:36', true],
+  ])('BZ4: of 36 min under a cap of %s: posted is %s', async (capHours, isPosted) => {
+    await approveTestScope(portal, osterby, capHours)
+    await creditTestBlock(portal, osterby.companyId)
+    expect((await post(await draftTime(portal, osterby, 31))).ok).toBe(isPosted)
+  })
+
   it('goes on under a higher cap once that is approved', async () => {
     await approveTestScope(portal, osterby, '0.5')
     await creditTestBlock(portal, osterby.companyId)

@@ -76,6 +76,7 @@ describe('a paid checkout', () => {
       validUntil: Date.UTC(2027, 11, 1, 9),
     })
     expect(state.events).toMatchObject([{ type: completedType, outcome: 'applied' }])
+    expect(state.effects).toEqual([{ object_id: sessionId, effect: 'credit' }])
   })
 
   it('numbers its receipts from 1 without a gap, whatever was refused or given up between', async () => {
