@@ -22,7 +22,7 @@ export async function openEngagement(page: Page): Promise<string> {
   await page.getByLabel('Switching frequency').fill('a lot')
   await page.getByRole('button', { name: 'Open the engagement' }).click()
   // A refused form says what is wrong and keeps what was typed.
-  await expect(page.getByRole('alert')).toBeVisible()
+  await expect(page.locator('main').getByRole('alert')).toBeVisible()
   await expect(page.getByLabel('Title')).toHaveValue('Servo drive rings at 103 MHz')
   await page.getByLabel('Switching frequency').fill('500k')
   await page.getByRole('button', { name: 'Open the engagement' }).click()
