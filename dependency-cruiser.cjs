@@ -24,6 +24,12 @@ module.exports = {
       'lib/core imports only lib/core: no npm, no node:*, no framework',
     ),
     rule(
+      'reference-is-core-and-schemas',
+      { path: '^lib/reference/' },
+      { pathNot: '^lib/(core|reference)/|(^|/)node_modules/zod/' },
+      'lib/reference answers reference cases from lib/core alone',
+    ),
+    rule(
       'domain-has-no-framework',
       { path: '^lib/(domain|authz|ports)/' },
       {
