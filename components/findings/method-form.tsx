@@ -1,11 +1,12 @@
 import type { FormAction } from '@/lib/core/action-state'
-import type { InputDefinitions } from '@/lib/core/method/method'
+import { isQuantity, type InputDefinitions } from '@/lib/core/method/input-definition'
 import { quantityText } from '@/lib/core/units/format-quantity'
 import type { Unit } from '@/lib/core/units/unit'
 import type { RunHeading } from '@/lib/domain/findings/run-dto'
 
 import { ActionForm } from '../forms/action-form'
-import { MethodInput, type OfferedResult } from './method-input'
+import { MethodEntry } from './method-entry'
+import { MethodQuantity, type OfferedResult } from './method-quantity'
 
 type MethodFormProps = {
   readonly engagementId: string
@@ -33,19 +34,23 @@ export const MethodForm = ({ engagementId, methodId, inputs, runs, startFrom, ac
         With a tolerance, such as 5 % or 0.2 pF, the results get a 95 % interval. Write k=2 behind it where a
         calibration states it.
       </p>
-      {Object.entries(inputs).map(([key, definition]) => (
-        <MethodInput
-          key={key}
-          inputKey={key}
-          definition={definition}
-          offered={offersOf(runs, definition.unit)}
-          initialPick={
-            start?.results.some((result) => result.key === key && result.unit === definition.unit)
-              ? `${start.runId}:${key}`
-              : undefined
-          }
-        />
-      ))}
+      {Object.entries(inputs).map(([key, definition]) =>
+        isQuantity(definition) ? (
+          <MethodQuantity
+            key={key}
+            inputKey={key}
+            definition={definition}
+            offered={offersOf(runs, definition.unit)}
+            initialPick={
+              start?.results.some((result) => result.key === key && result.unit === definition.unit)
+                ? `${start.runId}:${key}`
+                : undefined
+            }
+          />
+        ) : (
+          <MethodEntry key={key} inputKey={key} definition={definition} />
+        ),
+      )}
     </ActionForm>
   )
 }

@@ -1,5 +1,3 @@
-import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
-import { quantityText } from '@/lib/core/units/format-quantity'
 import type { RunDto, RunInputDto } from '@/lib/domain/findings/run-dto'
 
 import { TextLink } from '../ui/text-link'
@@ -16,7 +14,8 @@ export const RunOrigins = ({ run }: { readonly run: RunDto }) => (
     ) : null}
     {run.inputs.map((input) => (
       <li key={input.key}>
-        {input.label} <SymbolText symbol={input.symbol} /> <span className="num">{written(input)}</span>
+        {input.label} <SymbolText symbol={input.symbol} />{' '}
+        <span className="num">{writtenWithTolerance(input)}</span>
         <span className="block text-sm text-ink-soft">
           {input.fromRunId ? (
             <TextLink href={`/engagements/${run.engagementId}/bench/runs/${input.fromRunId}`}>
@@ -31,8 +30,7 @@ export const RunOrigins = ({ run }: { readonly run: RunDto }) => (
   </ul>
 )
 
-/** A typed value with the digits that it was typed with; a computed one with enough to be recognised. */
-function written({ value, unit, tolerance, fromRunId }: RunInputDto): string {
-  const text = fromRunId ? quantityText(value, unit, 5) : exactQuantityText(value, unit)
+function writtenWithTolerance({ written, tolerance }: RunInputDto): string {
+  const text = written.unit === '' ? written.number : `${written.number}\u00a0${written.unit}`
   return tolerance ? `${text} ± ${tolerance.replace(/^±\s*/u, '')}` : text
 }

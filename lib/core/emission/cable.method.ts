@@ -47,6 +47,7 @@ export const cableEmission = defineMethod({
     },
     { citation: 'Far field of a short current element', standing: 'derived here, checked from outside' },
   ],
+  example: { length: '1 m', current: '5 µA', frequency: '50 MHz', distance: '3 m', limit: '40 dBµV/m' },
   compute: ({ frequency, distance, length, current, limit }) =>
     ok({
       results: [

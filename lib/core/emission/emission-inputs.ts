@@ -1,4 +1,4 @@
-import type { InputDefinitions } from '../method/method'
+import type { InputDefinitions } from '../method/input-definition'
 
 const needed = { isRequired: true, above: 0, atMost: 1e15 } as const
 

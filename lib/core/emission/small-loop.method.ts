@@ -48,6 +48,7 @@ export const smallLoopEmission = defineMethod({
     },
     { citation: 'Far field of a magnetic dipole', standing: 'derived here, checked from outside' },
   ],
+  example: { area: '4 cm²', current: '20 mA', frequency: '180 MHz', distance: '3 m', limit: '43.5 dBµV/m' },
   compute: ({ frequency, distance, area, current, limit }) =>
     ok({
       results: [

@@ -75,6 +75,13 @@ export const filterCorner = defineMethod({
       standing: 'derived here, checked from outside',
     },
   ],
+  example: {
+    measured: '92 dBµV',
+    limit: '60 dBµV',
+    margin: '6 dB',
+    frequency: '420 kHz',
+    inductance: '4.7 µH',
+  },
   compute: ({ measured, limit, margin, frequency, inductance }) => {
     const attenuation = measured - limit + margin
     if (!(attenuation > 0)) {

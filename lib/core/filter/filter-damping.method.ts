@@ -57,6 +57,7 @@ export const filterDamping = defineMethod({
       atMost: 1e9,
     },
   },
+  example: { inductance: '4.7 µH', capacitance: '10 µF', ratio: '4', vIn: '48 V', pIn: '60 W' },
   compute: ({ inductance, capacitance, ratio, vIn, pIn }) => {
     if ((vIn === undefined) !== (pIn === undefined)) {
       const missing = vIn === undefined ? 'vIn' : 'pIn'

@@ -30,6 +30,7 @@ export const circularLoopInductance = defineMethod({
     },
     derivedHere,
   ],
+  example: { radius: '10 mm', wireRadius: '0.5 mm' },
   compute: ({ radius, wireRadius }) => {
     if (wireRadius >= radius)
       return err(noSolution('The wire must be thinner than the loop is wide.', 'wireRadius'))

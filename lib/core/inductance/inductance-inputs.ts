@@ -1,4 +1,5 @@
-import type { InputDefinition, ResultValue, Source } from '../method/method'
+import type { QuantityInput } from '../method/input-definition'
+import type { ResultValue, Source } from '../method/method'
 import { step } from '../method/result-value'
 
 /** A length between 10 nm and 10 km: far beyond any board, within which every formula is well conditioned. */
@@ -7,7 +8,7 @@ export const lengthInput = <Required extends boolean>(
   symbol: string,
   help: string,
   isRequired: Required,
-): InputDefinition & { readonly isRequired: Required } => ({
+): QuantityInput & { readonly isRequired: Required } => ({
   label,
   symbol,
   unit: 'm',

@@ -21,6 +21,7 @@ export const loopVoltage = defineMethod({
   ],
   cautions: ['The voltage adds to the supply at the switch: keep its rating above the sum, with margin.'],
   sources: [{ citation: 'Law of induction', standing: 'published' }],
+  example: { inductance: '8 nH', change: '12 A', time: '6 ns' },
   compute: ({ inductance, change, time }) =>
     ok({
       results: [

@@ -32,6 +32,7 @@ export const rectangularLoopInductance = defineMethod({
     { citation: 'F. W. Grover, Inductance Calculations, 1946 (from memory)', standing: 'published' },
     derivedHere,
   ],
+  example: { width: '30 mm', height: '10 mm', traceWidth: '1 mm', thickness: '35 µm' },
   compute: ({ width, height, wireRadius, traceWidth, thickness = 35e-6 }) => {
     if ((wireRadius === undefined) === (traceWidth === undefined)) {
       const message = 'Enter either the radius of a wire or the width of a trace.'

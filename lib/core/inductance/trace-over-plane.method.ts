@@ -34,6 +34,7 @@ export const traceOverPlaneInductance = defineMethod({
       standing: 'published',
     },
   ],
+  example: { width: '1 mm', height: '0.2 mm', length: '20 mm' },
   compute: ({ width, height, length }) => {
     const perLength = stripOverPlane(width, height)
     const ratio = width / height

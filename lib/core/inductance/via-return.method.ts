@@ -37,6 +37,7 @@ export const viaReturnInductance = defineMethod({
   ],
   cautions: loopCautions,
   sources: [derivedHere],
+  example: { height: '1 mm', distance: '1 mm', diameter: '0.3 mm', count: '2' },
   compute: ({ height, distance, diameter, count = 1 }) => {
     if (distance <= diameter) return err(noSolution('The vias must not touch: s is more than d.', 'distance'))
     if (!Number.isInteger(count)) return err(noSolution('The number of returns is a whole number.', 'count'))

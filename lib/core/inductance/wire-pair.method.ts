@@ -21,6 +21,7 @@ export const wirePairInductance = defineMethod({
   notes: ['A wire over a plane has half the inductance of the pair with twice its height as spacing.'],
   cautions: loopCautions,
   sources: [derivedHere],
+  example: { spacing: '2 mm', radius: '0.3 mm' },
   compute: ({ spacing, radius }) => {
     if (spacing <= 2 * radius)
       return err(noSolution('The wires must not touch: s is more than 2r.', 'spacing'))

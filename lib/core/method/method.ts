@@ -1,20 +1,7 @@
 import type { Figure } from '../figure/figure'
 import type { Result } from '../result'
 import type { Unit } from '../units/unit'
-
-/** One value that a method takes. The form, the interface and the report are made from this. */
-export type InputDefinition = {
-  readonly label: string
-  readonly symbol: string
-  readonly unit: Unit
-  readonly help: string
-  readonly isRequired: boolean
-  readonly above?: number
-  readonly atLeast?: number
-  readonly atMost?: number
-  /** What a form offers where nothing is known of the value: "5 %" for a part. */
-  readonly usualTolerance?: string
-}
+import type { InputDefinitions, InputValues, RawInput } from './input-definition'
 
 /** One value that a method gives, a main result or a step on the way to it. */
 export type ResultValue = {
@@ -34,11 +21,11 @@ export type Source = {
   readonly standing: 'published' | 'derived here, checked from outside' | 'common practice, no source'
 }
 
-/** Alternatives side by side; one row a choice, values in SI units. */
+/** Alternatives or steps side by side, one a row; values in SI units, names in text columns. */
 export type ChoiceTable = {
   readonly title: string
-  readonly columns: readonly { readonly label: string; readonly unit: Unit }[]
-  readonly rows: readonly (readonly number[])[]
+  readonly columns: readonly { readonly label: string; readonly unit: Unit | 'text' }[]
+  readonly rows: readonly (readonly (number | string)[])[]
 }
 
 export type MethodOutcome = {
@@ -52,13 +39,6 @@ export type MethodError = {
   readonly code: 'invalid_input' | 'no_solution'
   readonly message: string
   readonly fields: Readonly<Record<string, string>>
-}
-
-export type InputDefinitions = Readonly<Record<string, InputDefinition>>
-
-/** The values of a run in SI units; an optional input may be absent. */
-export type InputValues<Inputs extends InputDefinitions> = {
-  readonly [Key in keyof Inputs]: Inputs[Key]['isRequired'] extends true ? number : number | undefined
 }
 
 /**
@@ -75,6 +55,8 @@ export type Method<Inputs extends InputDefinitions = InputDefinitions> = {
   readonly notes: readonly string[]
   readonly cautions: readonly string[]
   readonly sources: readonly Source[]
+  /** Inputs of a worked example, as a person would type them. */
+  readonly example: Readonly<Record<string, RawInput>>
   /** A result with the key of an input that was left empty is what the method proposes for that input. */
   readonly compute: (values: InputValues<Inputs>) => Result<MethodOutcome, MethodError>
   /**
@@ -87,9 +69,6 @@ export type Method<Inputs extends InputDefinitions = InputDefinitions> = {
 /** Keeps the exact input types of a definition. */
 export const defineMethod = <const Inputs extends InputDefinitions>(method: Method<Inputs>): Method<Inputs> =>
   method
-
-/** Values without the types of their method, as a run holds them. */
-export type PlainValues = Readonly<Record<string, number>>
 
 /** A refusal that names the inputs it is about. */
 export const noSolution = (message: string, ...fields: readonly string[]): MethodError => ({

@@ -1,10 +1,17 @@
 import { err, ok, type Result } from '../result'
 import { parseQuantity } from '../units/parse-quantity'
-import { quantityText } from '../units/format-quantity'
-import type { InputDefinition, InputDefinitions, MethodError } from './method'
-
-/** A value as it comes from a person or a program: text in engineering notation, or a number in the SI unit. */
-export type RawInput = string | number
+import { boundProblem } from './bound-problem'
+import type {
+  ChoiceInput,
+  InputDefinition,
+  InputDefinitions,
+  PlainValue,
+  PlainValues,
+  QuantityInput,
+  RawInput,
+} from './input-definition'
+import type { MethodError } from './method'
+import { readTable } from './read-table'
 
 /**
  * Reads the inputs of a method from text or numbers and applies their bounds.
@@ -13,8 +20,8 @@ export type RawInput = string | number
 export function readInputs(
   definitions: InputDefinitions,
   raw: Readonly<Record<string, RawInput>>,
-): Result<Readonly<Record<string, number>>, MethodError> {
-  const values: Record<string, number> = {}
+): Result<PlainValues, MethodError> {
+  const values: Record<string, PlainValue> = {}
   const unknown = Object.keys(raw).filter((key) => !Object.hasOwn(definitions, key))
   // Built from entries, so that a key such as “__proto__” is a field like any other.
   const fields: Record<string, string> = Object.fromEntries(
@@ -34,22 +41,26 @@ export function readInputs(
   return err({ code: 'invalid_input', message: 'Some inputs need another look.', fields })
 }
 
-function readValue(definition: InputDefinition, given: RawInput): Result<number, string> {
+function readValue(definition: InputDefinition, given: RawInput): Result<PlainValue, string> {
+  switch (definition.kind) {
+    case 'choice':
+      return readChoice(definition, given)
+    case 'table':
+      return readTable(definition, given)
+    default:
+      return readQuantity(definition, given)
+  }
+}
+
+function readQuantity(definition: QuantityInput, given: RawInput): Result<number, string> {
+  if (typeof given === 'object') return err(`${definition.label} is one value, not a list.`)
   const parsed = typeof given === 'number' ? ok(given) : parseQuantity(given, definition.unit)
   if (!parsed.ok) return err(parsed.error.message)
   const problem = boundProblem(definition, parsed.value)
   return problem === null ? parsed : err(problem)
 }
 
-/** What is wrong with a value, as a sentence; null where it is within the bounds of its input. */
-export function boundProblem(
-  { label, unit, above, atLeast, atMost }: InputDefinition,
-  value: number,
-): string | null {
-  if (!Number.isFinite(value)) return `${label} must be a finite number.`
-  if (above !== undefined && value <= above) return `${label} must be more than ${quantityText(above, unit)}.`
-  if (atLeast !== undefined && value < atLeast)
-    return `${label} must be at least ${quantityText(atLeast, unit)}.`
-  if (atMost !== undefined && value > atMost) return `${label} can be at most ${quantityText(atMost, unit)}.`
-  return null
+function readChoice({ label, options }: ChoiceInput, given: RawInput): Result<string, string> {
+  if (typeof given === 'string' && Object.hasOwn(options, given)) return ok(given)
+  return err(`${label} is one of: ${Object.keys(options).join(', ')}.`)
 }

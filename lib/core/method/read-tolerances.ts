@@ -1,6 +1,7 @@
 import { err, ok, type Result } from '../result'
 import { parseTolerance, type Tolerance } from '../uncertainty/tolerance'
-import type { InputDefinitions, MethodError, PlainValues } from './method'
+import { isQuantity, type InputDefinitions, type PlainValues } from './input-definition'
+import type { MethodError } from './method'
 
 /** A tolerance as it comes from a person ("5 %", "0.2 pF", "2 % k=2") or from a stored run. */
 export type RawTolerance = string | Tolerance
@@ -37,8 +38,9 @@ function readOne(
 ): Result<Tolerance, string> {
   const definition = Object.hasOwn(definitions, key) ? definitions[key] : undefined
   if (definition === undefined) return err(`This method has no input “${key}”.`)
+  if (!isQuantity(definition)) return err(`${definition.label} takes no tolerance.`)
   const value = Object.hasOwn(values, key) ? values[key] : undefined
-  if (value === undefined) return err(`${definition.label} is left empty, so it has no tolerance.`)
+  if (typeof value !== 'number') return err(`${definition.label} is left empty, so it has no tolerance.`)
   if (typeof given === 'string') return parseTolerance(given, value, definition.unit)
   const isUsable = Number.isFinite(given.halfWidth) && given.halfWidth >= 0
   return isUsable ? ok(given) : err('A tolerance must be a finite number, not below 0.')

@@ -1,9 +1,9 @@
 import { err, ok, type Result } from '../result'
 import type { Uncertainty } from '../uncertainty/propagate'
 import type { Tolerance } from '../uncertainty/tolerance'
-import { noSolution, type InputDefinitions, type InputValues, type Method } from './method'
-import type { MethodError, MethodOutcome, PlainValues } from './method'
-import { readInputs, type RawInput } from './read-inputs'
+import type { InputDefinitions, InputValues, PlainValues, RawInput } from './input-definition'
+import { noSolution, type Method, type MethodError, type MethodOutcome } from './method'
+import { readInputs } from './read-inputs'
 import { readTolerances, type RawTolerance } from './read-tolerances'
 import { spreadResults } from './spread-results'
 
@@ -65,7 +65,12 @@ function proposals(definitions: InputDefinitions, values: PlainValues, outcome: 
 function whatIsNotFinite({ results, choices, figures }: MethodOutcome): string | null {
   const broken = results.find((result) => !Number.isFinite(result.value))
   if (broken) return broken.label.toLowerCase()
-  if (!choices.every(({ rows }) => rows.flat().every(Number.isFinite))) return 'alternatives'
+  if (
+    !choices.every(({ rows }) =>
+      rows.flat().every((cell) => typeof cell === 'string' || Number.isFinite(cell)),
+    )
+  )
+    return 'alternatives'
   const isDrawable = figures.every(({ series }) =>
     series.every(({ x, y }) => x.every(Number.isFinite) && y.every(Number.isFinite)),
   )

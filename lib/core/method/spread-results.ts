@@ -1,9 +1,9 @@
 import { err, ok, type Result } from '../result'
 import { propagate, type Uncertainty } from '../uncertainty/propagate'
 import type { Tolerance } from '../uncertainty/tolerance'
-import { noSolution, type InputValues, type InputDefinitions, type Method, type MethodError } from './method'
-import type { PlainValues, ResultValue } from './method'
-import { boundProblem } from './read-inputs'
+import { boundProblem } from './bound-problem'
+import { isQuantity, type InputDefinitions, type InputValues, type PlainValues } from './input-definition'
+import { noSolution, type Method, type MethodError, type ResultValue } from './method'
 import { toleranceField } from './read-tolerances'
 
 /** The 95 % intervals of the results of a run, from the tolerances of its inputs; null where there are none. */
@@ -16,7 +16,7 @@ export function spreadResults<Inputs extends InputDefinitions>(
   if (keys.length === 0) return ok(null)
   const inputs = Object.entries(tolerances).map(([key, tolerance]) => ({
     key,
-    value: values[key] ?? 0,
+    value: Number(values[key] ?? 0),
     tolerance,
     isPossible: (drawn: number) => isPossible(method.inputs, key, drawn),
   }))
@@ -29,13 +29,13 @@ export function spreadResults<Inputs extends InputDefinitions>(
 
 const isPossible = (definitions: InputDefinitions, key: string, value: number): boolean => {
   const definition = definitions[key]
-  return definition !== undefined && boundProblem(definition, value) === null
+  return definition !== undefined && isQuantity(definition) && boundProblem(definition, value) === null
 }
 
 function resultsAt<Inputs extends InputDefinitions>(
   method: Method<Inputs>,
   values: PlainValues,
-): Result<PlainValues, MethodError> {
+): Result<Readonly<Record<string, number>>, MethodError> {
   // The values hold every required input: they are those of a run that went well, with some of them moved.
   const typed = values as InputValues<Inputs>
   const results = method.computeResults?.(typed)
@@ -44,7 +44,7 @@ function resultsAt<Inputs extends InputDefinitions>(
   return outcome.ok ? finite(outcome.value.results) : outcome
 }
 
-function finite(results: readonly ResultValue[]): Result<PlainValues, MethodError> {
+function finite(results: readonly ResultValue[]): Result<Readonly<Record<string, number>>, MethodError> {
   const broken = results.find((result) => !Number.isFinite(result.value))
   if (broken) return err(noSolution(`${broken.label} is not finite.`))
   return ok(Object.fromEntries(results.map(({ key, value }) => [key, value])))

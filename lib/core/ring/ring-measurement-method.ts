@@ -1,9 +1,10 @@
-import type { InputDefinition, ResultValue, Source } from '../method/method'
+import type { QuantityInput } from '../method/input-definition'
+import type { ResultValue, Source } from '../method/method'
 import { main, step } from '../method/result-value'
 
 import type { RingMeasurement } from './ring-measurement'
 
-const instant = (label: string, symbol: string, help: string): InputDefinition => ({
+const instant = (label: string, symbol: string, help: string): QuantityInput => ({
   label,
   symbol,
   unit: 's',

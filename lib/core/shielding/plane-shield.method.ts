@@ -75,6 +75,7 @@ export const planeShield = defineMethod({
     },
     { citation: 'Conductivity of copper: IEC 60028 (from memory)', standing: 'published' },
   ],
+  example: { frequency: '30 MHz', thickness: '35 µm', conductivity: '58 MS/m', permeability: '1' },
   compute: ({ frequency, thickness, conductivity = copper, permeability = 1 }) => {
     const sheet: Sheet = { conductivity, permeability, thickness }
     const depth = skinDepth(frequency, sheet)

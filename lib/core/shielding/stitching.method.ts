@@ -52,6 +52,7 @@ export const stitchingDistance = defineMethod({
       standing: 'common practice, no source',
     },
   ],
+  example: { frequency: '1 GHz', permittivity: '4.3' },
   compute: ({ frequency, permittivity, fraction = usualFraction }) => {
     const wavelength = speedOfLight / (frequency * Math.sqrt(permittivity))
     return ok({

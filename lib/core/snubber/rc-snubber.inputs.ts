@@ -1,4 +1,4 @@
-import type { InputDefinitions } from '../method/method'
+import type { InputDefinitions } from '../method/input-definition'
 
 /** The bounds are far beyond any board; within them every step of the computation is well conditioned. */
 const bounds = {

@@ -15,6 +15,7 @@ export const rcSnubber = defineMethod({
   version: 1,
   ...rcSnubberTexts,
   inputs: rcSnubberInputs,
+  example: { lPar: '8 nH', cPar: '300 pF', vStep: '12 V', fSw: '500 kHz', cSnub: '1 nF' },
   compute: (values) => {
     const { bare, edge } = circuitOf(values)
     const cs = values.cSnub ?? usualCapacitance(bare)

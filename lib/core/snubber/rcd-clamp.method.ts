@@ -66,6 +66,15 @@ export const rcdClamp = defineMethod({
       standing: 'published',
     },
   ],
+  example: {
+    lLeak: '3 µH',
+    iPeak: '1.8 A',
+    fSw: '100 kHz',
+    vClamp: '180 V',
+    turnsRatio: '8',
+    vOut: '12.5 V',
+    ripple: '15 V',
+  },
   compute: ({ lLeak, iPeak, fSw, vClamp, turnsRatio, vOut, ripple }) => {
     const reflected = turnsRatio * vOut
     const duty = clampDuty({

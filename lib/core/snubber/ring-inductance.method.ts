@@ -53,6 +53,7 @@ export const ringInductance = defineMethod({
     },
     { citation: 'Designing RC snubbers, Nexperia AN11160, Rev. 3.0, 2023', standing: 'published' },
   ],
+  example: { f0: '102.7 MHz', cPar: '300 pF' },
   compute: ({ f0, zeta0, cPar }) => {
     const frequency = naturalFrequency(f0, zeta0 ?? 0)
     const inductance = 1 / ((2 * Math.PI * frequency) ** 2 * cPar)

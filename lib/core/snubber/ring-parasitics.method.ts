@@ -65,6 +65,7 @@ export const ringParasitics = defineMethod({
       standing: 'derived here, checked from outside',
     },
   ],
+  example: { f0: '102.7 MHz', f1: '64.1 MHz', cAdd: '470 pF' },
   compute: (values) => {
     const f0 = naturalFrequency(values.f0, values.zeta0 ?? 0)
     const f1 = naturalFrequency(values.f1, values.zeta1 ?? 0)

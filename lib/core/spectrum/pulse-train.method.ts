@@ -61,6 +61,7 @@ export const pulseTrainSpectrum = defineMethod({
       atMost: 1e6,
     },
   },
+  example: { amplitude: '5 V', frequency: '10 MHz', width: '40 ns', rise: '2 ns', fall: '2 ns' },
   compute: (values) => {
     const results = resultsOf(values)
     if (!results.ok) return results

@@ -15,6 +15,7 @@ import {
   parseFigures,
   parseInputs,
   parseResult,
+  type InputValue,
   type MeasuredTrace,
   type RunInputs,
   type RunOutcome,
@@ -83,10 +84,14 @@ async function measureAgain(
   }
   const read = await deps.captures.analyse(trace.evidenceId)
   if (!read.ok) return err(read.error.message)
-  const window = { from: values['from']?.value ?? null, to: values['to']?.value ?? null }
+  const window = { from: instantOf(values['from']), to: instantOf(values['to']) }
   const measured = await measureTrace(deps.files, trace, read.value, window)
   return measured.ok ? measured : err(measured.error.message)
 }
+
+/** An end of the window, in seconds. */
+const instantOf = (input: InputValue | undefined): number | null =>
+  typeof input?.value === 'number' ? input.value : null
 
 async function hashOf(body: ReadableStream<Uint8Array>): Promise<string> {
   const hash = createHash('sha256')

@@ -1,4 +1,5 @@
-import type { InputDefinitions, Source } from '@/lib/core/method/method'
+import type { InputDefinitions } from '@/lib/core/method/input-definition'
+import type { Source } from '@/lib/core/method/method'
 import { findMethod } from '@/lib/core/method/registry'
 import { ringMeasurementMethod } from '@/lib/core/ring/ring-measurement-method'
 

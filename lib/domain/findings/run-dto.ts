@@ -3,9 +3,10 @@ import 'server-only'
 import type { RunEvidenceRow, RunListRow, RunRow } from '@/db/repositories/method-run.repo'
 import type { Figure } from '@/lib/core/figure/figure'
 import type { ChoiceTable, ResultValue, ValidityCheck } from '@/lib/core/method/method'
-import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
+import { isQuantity, type InputDefinition, type PlainValue } from '@/lib/core/method/input-definition'
+import { writtenValue } from '@/lib/core/method/written-value'
+import { formatQuantity } from '@/lib/core/units/format-quantity'
 import type { ResultInterval } from '@/lib/core/uncertainty/propagate'
-import type { Unit } from '@/lib/core/units/unit'
 
 import { definitionOf, type MethodDefinition } from './run-definition'
 import { parseFigures, parseInputs, parseResult, type InputValue, type RunInputs } from './run-record'
@@ -22,9 +23,10 @@ export type RunInputDto = {
   readonly key: string
   readonly label: string
   readonly symbol: string
-  readonly unit: Unit
-  /** In the SI unit. */
-  readonly value: number
+  /** In the SI unit, the key of a choice, or rows. */
+  readonly value: PlainValue
+  /** For the eye, number and unit apart where there is one number. */
+  readonly written: { readonly number: string; readonly unit: string }
   /** As it was stated, such as "5 %"; null where nothing was said. */
   readonly tolerance: string | null
   /** Where the value comes from, as a sentence without its full stop. */
@@ -118,28 +120,44 @@ function inputsOf(
   definition: MethodDefinition,
   creator: string,
 ): RunInputDto[] {
-  const inputOf = (key: string, value: number, origin: string, fromRunId: string | null): RunInputDto => ({
+  const inputOf = (
+    key: string,
+    value: PlainValue,
+    origin: string,
+    fromRunId: string | null,
+  ): RunInputDto => ({
     key,
     label: definition.inputs[key]?.label ?? key,
     symbol: definition.inputs[key]?.symbol ?? '',
-    unit: definition.inputs[key]?.unit ?? '',
     value,
+    written: writtenParts(definition.inputs[key], value, fromRunId !== null),
     tolerance: tolerances[key]?.text ?? null,
     origin,
     fromRunId,
   })
   const given = Object.entries(values).map(([key, input]) => {
-    const origin = originOf(input, definition.inputs[key]?.unit ?? '', creator)
+    const origin = originOf(input, definition.inputs[key], creator)
     return inputOf(key, input.value, origin, input.by === 'run' ? input.runId : null)
   })
   const proposed = results.filter(({ key }) => Object.hasOwn(tolerances, key) && !Object.hasOwn(values, key))
   return [...given, ...proposed.map(({ key, value }) => inputOf(key, value, 'Proposed by the method', null))]
 }
 
-function originOf(input: InputValue, unit: Unit, creator: string): string {
+/** A typed value with the digits that it was typed with; a computed one with enough to be recognised. */
+function writtenParts(definition: InputDefinition | undefined, value: PlainValue, isComputed: boolean) {
+  if (!definition || !isQuantity(definition)) {
+    return { number: definition ? writtenValue(definition, value) : String(value), unit: '' }
+  }
+  if (isComputed) return formatQuantity(Number(value), definition.unit, 5)
+  const [number = '', unit = ''] = writtenValue(definition, value).split('\u00a0')
+  return { number, unit }
+}
+
+function originOf(input: InputValue, definition: InputDefinition | undefined, creator: string): string {
   if (input.by === 'run') {
     return `${input.resultLabel} ${input.resultSymbol} of run ${input.runNumber}, ${input.runTitle}`
   }
-  const exact = exactQuantityText(input.value, unit)
+  if (!definition || !isQuantity(definition)) return `Entered by ${creator}`
+  const exact = writtenValue(definition, input.value)
   return `Typed by ${creator} as “${input.text}”${exact === input.text ? '' : `, that is ${exact}`}`
 }

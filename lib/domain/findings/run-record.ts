@@ -6,9 +6,16 @@ import { units } from '@/lib/core/units/unit'
 /** What a run keeps as JSON. The zod schemas read the rows back; the types are made of them. */
 const unit = z.enum(units)
 
+/** A number, the key of a choice, or rows. */
+const plainValue = z.union([
+  z.number(),
+  z.string(),
+  z.array(z.record(z.string(), z.union([z.number(), z.string()]))).readonly(),
+])
+
 const typedValue = z.object({
   by: z.literal('typed'),
-  value: z.number(),
+  value: plainValue,
   text: z.string(),
 })
 
@@ -89,8 +96,8 @@ const runResult = z.object({
   choices: z.array(
     z.object({
       title: z.string(),
-      columns: z.array(z.object({ label: z.string(), unit })),
-      rows: z.array(z.array(z.number())),
+      columns: z.array(z.object({ label: z.string(), unit: z.enum([...units, 'text']) })),
+      rows: z.array(z.array(z.union([z.number(), z.string()]))),
     }),
   ),
   validity: z.array(z.object({ passed: z.boolean(), sentence: z.string() })),

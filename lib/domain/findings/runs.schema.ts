@@ -23,7 +23,10 @@ const entry = z.string().max(60, 'Shorten this entry.').default('')
 /** How far the value may be off, such as "5 %" or "0.2 pF"; empty means that nothing is said about it. */
 const tolerance = entry
 
-const typed = z.strictObject({ text: entry, tolerance })
+/** One value, the key of a choice, or the rows of a table. */
+const text = z.string().max(500_000, 'Shorten this entry.').default('')
+
+const typed = z.strictObject({ text, tolerance })
 
 const picked = z.strictObject({ fromRun: idField, key: resultKey, tolerance })
 

@@ -4,7 +4,7 @@ import type { Db } from '@/db/client'
 import { findRun, listRunEvidence } from '@/db/repositories/method-run.repo'
 import { ok, type Result } from '@/lib/core/result'
 import type { RegisteredMethod } from '@/lib/core/method/registry'
-import type { RawInput } from '@/lib/core/method/read-inputs'
+import { isQuantity, type RawInput } from '@/lib/core/method/input-definition'
 
 import { runTitleOf } from './run-dto'
 import { parseInputs, parseResult, type InputValue } from './run-record'
@@ -43,7 +43,9 @@ export async function takeInputs(
       raw[key] = texts[key] = input.text.trim()
       continue
     }
-    const found = await pickedValue(db, engagementId, input, method.inputs[key]?.unit)
+    const definition = method.inputs[key]
+    const unit = definition && isQuantity(definition) ? definition.unit : undefined
+    const found = await pickedValue(db, engagementId, input, unit)
     if (typeof found === 'string') refused[key] = found
     else raw[key] = (picked[key] = found).value
   }

@@ -40,7 +40,9 @@ export function frozenRun(run: RunDto, index: number): ReportRun {
     formulas: definition.formulas,
     sources: definition.sources.map(({ citation, standing }) => `${citation} (${standing})`),
     inputs: run.inputs.map((input) => ({
-      ...printed(input.label, input.symbol, input.unit, input.value),
+      label: input.label,
+      symbol: input.symbol,
+      ...input.written,
       origin: input.origin,
     })),
     results: run.results.map((result) => ({

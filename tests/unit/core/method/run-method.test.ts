@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 
-import type { InputDefinition } from '@/lib/core/method/method'
+import type { InputDefinition, QuantityInput, RawInput } from '@/lib/core/method/input-definition'
 import { findMethod, methods } from '@/lib/core/method/registry'
 import type { MethodRun } from '@/lib/core/method/run-method'
 
@@ -109,7 +109,33 @@ describe('tolerances of the inputs', () => {
 })
 
 /** Mostly within the bounds of an input, at every order of magnitude; sometimes left empty or out of all bounds. */
-function anyValueFor({ atLeast, above, atMost, isRequired }: InputDefinition): fc.Arbitrary<string | number> {
+function anyValueFor(definition: InputDefinition): fc.Arbitrary<RawInput> {
+  switch (definition.kind) {
+    case 'choice':
+      return fc.constantFrom(...Object.keys(definition.options), ...(definition.isRequired ? [] : ['']))
+    case 'table': {
+      const cells = Object.entries(definition.columns).map(([key, { unit, ...column }]) => [
+        key,
+        unit === 'text'
+          ? fc.constantFrom('one', 'two', 'three')
+          : anyQuantityFor({ ...definition, kind: 'quantity', unit, ...column, isRequired: true }),
+      ])
+      const row = fc.record(Object.fromEntries(cells) as Record<string, fc.Arbitrary<string | number>>)
+      const { leastRows, mostRows } = definition
+      const rows = fc.array(row, { minLength: leastRows, maxLength: Math.min(mostRows, leastRows + 6) })
+      return definition.isRequired ? rows : fc.oneof(rows, fc.constant(''))
+    }
+    default:
+      return anyQuantityFor(definition)
+  }
+}
+
+function anyQuantityFor({
+  atLeast,
+  above,
+  atMost,
+  isRequired,
+}: QuantityInput): fc.Arbitrary<string | number> {
   const low = Math.max(atLeast ?? above ?? 1e-15, 1e-15)
   const high = atMost ?? 1e12
   const within = fc
@@ -138,11 +164,15 @@ describe('every registered method', () => {
     }
   })
 
+  it.each(methods)('$id answers its worked example', (method) => {
+    expect(method.run(method.example)).toMatchObject({ ok: true })
+  })
+
   it.each(methods)(
     '$id answers any values with finite numbers or a refusal, and the same ones again',
     (method) => {
       const entries = Object.entries(method.inputs).map(([key, definition]) => [key, anyValueFor(definition)])
-      const raw = fc.record(Object.fromEntries(entries) as Record<string, fc.Arbitrary<string | number>>)
+      const raw = fc.record(Object.fromEntries(entries) as Record<string, fc.Arbitrary<RawInput>>)
       fc.assert(
         fc.property(raw, (values) => {
           const run = method.run(values)

@@ -2,7 +2,7 @@
 
 import { useState } from 'react'
 
-import type { InputDefinition } from '@/lib/core/method/method'
+import type { QuantityInput } from '@/lib/core/method/input-definition'
 
 import { FormQuantity, FormSelect, FormText } from '../forms/form-fields'
 import { MathText, SymbolText } from './math-text'
@@ -16,15 +16,15 @@ export type OfferedResult = {
   readonly written: string
 }
 
-type MethodInputProps = {
+type MethodQuantityProps = {
   readonly inputKey: string
-  readonly definition: InputDefinition
+  readonly definition: QuantityInput
   readonly offered: readonly OfferedResult[]
   readonly initialPick?: string | undefined
 }
 
-/** One input: typed, or taken from a stored run; then the entry shows that value and is not sent. */
-export const MethodInput = ({ inputKey, definition, offered, initialPick = '' }: MethodInputProps) => {
+/** One value: typed, or taken from a stored run; then the entry shows that value and is not sent. */
+export const MethodQuantity = ({ inputKey, definition, offered, initialPick = '' }: MethodQuantityProps) => {
   const [text, type] = useState('')
   const [pick, choose] = useState(initialPick)
   const picked = offered.find((result) => result.value === pick)
