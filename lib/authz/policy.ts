@@ -32,6 +32,7 @@ export const policy = {
   'evidence.read': engagementPeople,
   'evidence.stateFacts': engagementPeople,
 
+  'method.read': ['signed_in'],
   'run.create': ['assigned_consultant'],
   'run.read': ['assigned_consultant'],
   'finding.write': ['assigned_consultant'],

@@ -16,6 +16,7 @@ export function navigationFor(actor: Actor): readonly NavigationEntry[] {
     entries.push({ label: `Hours${suffix}`, href: `/companies/${companyId}/hours` })
     entries.push({ label: `People${suffix}`, href: `/companies/${companyId}/people` })
   }
+  entries.push({ label: 'Methods', href: '/methods' })
   if (actor.isAdministrator) {
     entries.push(
       { label: 'Clients', href: '/clients' },

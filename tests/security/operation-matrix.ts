@@ -1,9 +1,9 @@
 /**
  * What every operation is about. `engagement` and `company` ones take that id alone here and are replayed as strangers;
  * `row` ones take the id of something inside an engagement or company and are replayed in the tests of their domain;
- * `practice` ones are for the administrator; `own` ones act on the person who asks; `open` ones need no sign-in.
+ * `practice` ones are for the administrator; `own` ones act on the person who asks; `signed in` ones tell everybody the same; `open` ones need no sign-in.
  */
-export type About = 'engagement' | 'company' | 'row' | 'practice' | 'own' | 'open'
+export type About = 'engagement' | 'company' | 'row' | 'practice' | 'own' | 'signed in' | 'open'
 
 export const operationMatrix: Readonly<Record<string, About>> = {
   'billing.booksOverview': 'practice',
@@ -64,6 +64,8 @@ export const operationMatrix: Readonly<Record<string, About>> = {
   'identity.setPassword': 'open',
   'identity.signIn': 'open',
   'identity.signOutEverywhere': 'own',
+  'methods.get': 'signed in',
+  'methods.list': 'signed in',
   'reports.addRemark': 'row',
   'reports.approve': 'row',
   'reports.checkCode': 'open',

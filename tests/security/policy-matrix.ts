@@ -46,6 +46,7 @@ export const policyMatrix: Readonly<Record<Action, Row>> = {
   'evidence.add': { about: 'engagement', may: people },
   'evidence.read': { about: 'engagement', may: people },
   'evidence.stateFacts': { about: 'engagement', may: people },
+  'method.read': { about: 'practice', may: everybody },
   'run.create': { about: 'engagement', may: ['consultant on it'] },
   'run.read': { about: 'engagement', may: ['consultant on it'] },
   'finding.write': { about: 'engagement', may: ['consultant on it'] },

@@ -30,26 +30,44 @@ export type RegisteredMethod = Omit<Method, 'compute' | 'computeResults' | 'inpu
   ) => Result<MethodRun, MethodError>
 }
 
-/** Every method of the practice. Adding one is a folder, its test, and a line here. */
-export const methods: readonly RegisteredMethod[] = [
-  register(ringParasitics),
-  register(ringInductance),
-  register(rcSnubber),
-  register(rcdClamp),
-  register(pulseTrainSpectrum),
-  register(rectangularLoopInductance),
-  register(circularLoopInductance),
-  register(traceOverPlaneInductance),
-  register(wirePairInductance),
-  register(viaReturnInductance),
-  register(loopVoltage),
-  register(smallLoopEmission),
-  register(cableEmission),
-  register(planeShield),
-  register(stitchingDistance),
-  register(filterCorner),
-  register(filterDamping),
+export type MethodGroup = { readonly title: string; readonly methods: readonly RegisteredMethod[] }
+
+/** Every method of the practice by its subject. Adding one is a folder, its test, and a line here. */
+export const methodGroups: readonly MethodGroup[] = [
+  {
+    title: 'Ringing and snubbers',
+    methods: [register(ringParasitics), register(ringInductance), register(rcSnubber), register(rcdClamp)],
+  },
+  {
+    title: 'Spectrum and limits',
+    methods: [register(pulseTrainSpectrum)],
+  },
+  {
+    title: 'Inductance',
+    methods: [
+      register(rectangularLoopInductance),
+      register(circularLoopInductance),
+      register(traceOverPlaneInductance),
+      register(wirePairInductance),
+      register(viaReturnInductance),
+      register(loopVoltage),
+    ],
+  },
+  {
+    title: 'Emission and near field',
+    methods: [register(smallLoopEmission), register(cableEmission)],
+  },
+  {
+    title: 'Return paths and shielding',
+    methods: [register(planeShield), register(stitchingDistance)],
+  },
+  {
+    title: 'Input filters',
+    methods: [register(filterCorner), register(filterDamping)],
+  },
 ]
+
+export const methods: readonly RegisteredMethod[] = methodGroups.flatMap((group) => group.methods)
 
 export const findMethod = (id: string): RegisteredMethod | undefined =>
   methods.find((method) => method.id === id)

@@ -51,4 +51,6 @@ export const runMethodSchema = z.strictObject({
 
 export type GivenInput = z.output<typeof typed> | z.output<typeof picked>
 
+export const methodIdSchema = z.strictObject({ methodId: z.string().max(60) })
+
 export const openMethodSchema = z.strictObject({ engagementId: idField, methodId: z.string().max(60) })
