@@ -2,6 +2,7 @@ import type { RunDto } from '@/lib/domain/findings/run-dto'
 
 import { FigureSvg } from '../charts/figure-svg'
 import { Sheet } from '../ui/sheet'
+import { TextLink } from '../ui/text-link'
 import { ChoiceTables } from './choice-tables'
 import { FormulaList } from './formula-list'
 import { MethodCaution } from './method-caution'
@@ -35,6 +36,11 @@ export const RunSheets = ({ run }: { readonly run: RunDto }) => (
         <FormulaList formulas={run.definition.formulas} />
         <NoteList notes={run.definition.notes} />
         <SourceList sources={run.definition.sources} />
+        {run.trace ? null : (
+          <p>
+            <TextLink href={`/methods/${run.methodId}`}>Ranges, worked example and use in scripts</TextLink>
+          </p>
+        )}
       </div>
     </Sheet>
     <MethodCaution cautions={run.definition.cautions} />

@@ -2,11 +2,12 @@ import 'server-only'
 
 import { authorize, notFound } from '@/lib/authz/authorize'
 import { practice } from '@/lib/authz/resource'
-import { findMethod, methodGroups } from '@/lib/core/method/registry'
+import { findMethod } from '@/lib/core/method/registry'
 import { err, ok } from '@/lib/core/result'
 
 import { noInput } from '../form-fields'
 import { operation } from '../operation'
+import { methodHeadings } from './method-headings'
 import { methodDefinition } from './run-definition'
 import { methodIdSchema } from './runs.schema'
 
@@ -14,12 +15,7 @@ import { methodIdSchema } from './runs.schema'
 export const listMethodPages = operation('methods.list', noInput, async (_deps, actor) => {
   const allowed = authorize(actor, 'method.read', practice)
   if (!allowed.ok) return allowed
-  return ok(
-    methodGroups.map(({ title, methods }) => ({
-      title,
-      methods: methods.map(({ id, title: name, purpose }) => ({ methodId: id, title: name, purpose })),
-    })),
-  )
+  return ok(methodHeadings())
 })
 
 /** All that is to be known of a method, with its worked example computed now. */

@@ -3,13 +3,14 @@ import 'server-only'
 import { listRunsOf } from '@/db/repositories/method-run.repo'
 import { withTx } from '@/db/tx'
 import { notFound } from '@/lib/authz/authorize'
-import { findMethod, methods } from '@/lib/core/method/registry'
+import { findMethod } from '@/lib/core/method/registry'
 import { toleranceField } from '@/lib/core/method/read-tolerances'
 import type { MethodRun } from '@/lib/core/method/run-method'
 import { err, ok } from '@/lib/core/result'
 
 import { engagementFor } from '../engagements/engagement-resource'
 import { operation } from '../operation'
+import { methodHeadings } from './method-headings'
 import { outcomeOf } from './method-outcome'
 import { methodDefinition } from './run-definition'
 import { runHeadingOf } from './run-dto'
@@ -69,7 +70,7 @@ export const getRun = operation('runs.get', runIdSchema, async (deps, actor, inp
 export const listMethods = operation('runs.listMethods', engagementIdSchema, async (deps, actor, input) => {
   const engagement = await engagementFor(deps.db, actor, 'run.create', input.engagementId)
   if (!engagement.ok) return engagement
-  return ok(methods.map(({ id, title, purpose }) => ({ methodId: id, title, purpose })))
+  return ok(methodHeadings())
 })
 
 /** The definition that the form of a method is made from. */

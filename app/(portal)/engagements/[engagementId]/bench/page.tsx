@@ -46,7 +46,14 @@ export default async function BenchPage({
         )}
       </Sheet>
       <Sheet title="Methods">
-        <MethodList base={`${base}/bench`} methods={methods} />
+        <div className="flex flex-col gap-6">
+          {methods.map((group) => (
+            <section key={group.title} aria-label={group.title}>
+              <h3 className="mb-2 border-b border-rule text-base">{group.title}</h3>
+              <MethodList base={`${base}/bench`} methods={group.methods} />
+            </section>
+          ))}
+        </div>
       </Sheet>
       {stored.length === 0 ? (
         <EmptyState title="No run yet">
