@@ -15,17 +15,21 @@ const testTools = {
   ngspice: 'ngspice',
 }
 
+/** Python libraries that results are held against, and the packages that bring them. */
+const testLibraries = { numpy: 'python3-numpy', scipy: 'python3-scipy' }
+
 /** Installs the packages of package-lock.json where they are absent or of other versions. */
 export async function installPackages() {
   checkNode()
   if (isInstalled()) return
-  await installTools(buildTools, 'to compile the database driver')
+  await installMissing(absent(buildTools, isOnPath), 'to compile the database driver')
   say('Installing packages with npm ci (about two minutes; the database driver is compiled)')
   await run('npm', ['ci', '--no-audit', '--no-fund', '--loglevel=error'])
 }
 
-/** Installs what the tests check results with: a browser, PDF tools, a circuit simulator. */
-export const installTestTools = () => installTools(testTools, 'for the tests')
+/** Installs what the tests check results with: a browser, PDF tools, a circuit simulator, numerical libraries. */
+export const installTestTools = () =>
+  installMissing([...absent(testTools, isOnPath), ...absent(testLibraries, isInPython)], 'for the tests')
 
 /** npm keeps a list of what it put into node_modules; it must hold every package of the lock file that is not optional. */
 function isInstalled() {
@@ -47,10 +51,14 @@ function checkNode() {
   }
 }
 
-async function installTools(tools, purpose) {
-  const missing = Object.entries(tools).filter(([program]) => !isOnPath(program))
+const absent = (tools, isThere) =>
+  Object.entries(tools)
+    .filter(([name]) => !isThere(name))
+    .map(([, debianPackage]) => debianPackage)
+
+async function installMissing(missing, purpose) {
   if (missing.length === 0) return
-  const packages = [...new Set(missing.map(([, debianPackage]) => debianPackage))]
+  const packages = [...new Set(missing)]
   const command = `apt-get install -y --no-install-recommends ${packages.join(' ')}`
   if (!isOnPath('apt-get')) {
     stop(
@@ -68,9 +76,15 @@ async function installTools(tools, purpose) {
   await run('sh', ['-c', `${command} -qq > /dev/null`], { env })
 }
 
-function isOnPath(program) {
+const isOnPath = (program) => succeeds('sh', ['-c', `command -v ${program}`])
+
+/** In the Python of the path or in the system's, which may be another one. */
+const isInPython = (library) =>
+  ['python3', '/usr/bin/python3'].some((python) => succeeds(python, ['-c', `import ${library}`]))
+
+function succeeds(program, args) {
   try {
-    execFileSync('sh', ['-c', `command -v ${program}`], { stdio: 'ignore' })
+    execFileSync(program, args, { stdio: 'ignore' })
     return true
   } catch {
     return false
