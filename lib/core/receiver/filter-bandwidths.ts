@@ -45,3 +45,19 @@ const impulsePeakAt = ((): number => {
   }
   return (low + high) / 2
 })()
+
+/**
+ * The gain of the two stages `offset` Hz away from the frequency to which they are tuned, real and imaginary:
+ *
+ *     H = (2ω₀²/((ω₀ + jω)² + ω₀²))²
+ */
+export function coupledStagesGain(b6: number, offset: number): readonly [number, number] {
+  const corner = cornerOf(b6)
+  const omega = 2 * Math.PI * offset
+  const real = 2 * corner ** 2 - omega ** 2
+  const imaginary = 2 * corner * omega
+  const scale = (2 * corner ** 2) / (real ** 2 + imaginary ** 2)
+  const oneR = scale * real
+  const oneI = -scale * imaginary
+  return [oneR ** 2 - oneI ** 2, 2 * oneR * oneI]
+}

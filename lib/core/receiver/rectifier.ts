@@ -17,8 +17,16 @@ export type Rectifier = {
   readonly efficiency: number
 }
 
+const made = new WeakMap<QuasiPeakTimes, Rectifier>()
+
 /** A rectifier that a suddenly applied sine charges to 63.2 % of its final voltage in the given time. */
-export function rectifierOf({ charge, discharge }: QuasiPeakTimes): Rectifier {
+export function rectifierOf(times: QuasiPeakTimes): Rectifier {
+  const rectifier = made.get(times) ?? makeRectifier(times)
+  made.set(times, rectifier)
+  return rectifier
+}
+
+function makeRectifier({ charge, discharge }: QuasiPeakTimes): Rectifier {
   // The charge in the given time rises with k, so that halving finds it.
   let low = 1 / charge
   let high = 1e4 / charge
