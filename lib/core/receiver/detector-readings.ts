@@ -12,7 +12,7 @@ export type MeasuredRecord = {
   readonly values: Float64Array
   /** Between two values, in seconds. */
   readonly interval: number
-  /** Pulses per second, where the record holds one pulse; null where the record repeats as it is, or is long. */
+  /** Pulses per second, where it is known; null where the record repeats as it is. */
   readonly pulseRate: number | null
 }
 
@@ -69,10 +69,11 @@ export function detectorReadings(
   if (!Number.isFinite(peak)) {
     return err({ code: 'nothing_there', message: 'Nothing is left of the record in this passband.' })
   }
-  const repeated = record.pulseRate === null ? cycle : { ...cycle, period: 1 / record.pulseRate }
+  // A record of several pulses repeats as it is; one of a single pulse is followed by silence.
+  const period = Math.max(duration, record.pulseRate === null ? 0 : 1 / record.pulseRate)
   return ok({
     peak,
-    average: levelOfPeak(meanOf(repeated)),
+    average: levelOfPeak(meanOf({ ...cycle, period })),
     quasiPeak: quasiPeakReading(cycle, peak, record.pulseRate, duration, band),
     lengthNeeded: band.quasiPeak === null ? null : lengthForQuasiPeak(band.quasiPeak),
   })
