@@ -3,9 +3,10 @@ import { fileURLToPath } from 'node:url'
 
 import { describe, expect, it } from 'vitest'
 
+import { pythonWithScipy } from '@/lib/commands/python'
 import { transformReal } from '@/lib/core/fourier/real-transform'
 
-import { hasNumpy } from './has-numpy'
+const python = pythonWithScipy()
 
 const script = fileURLToPath(new URL('./fourier-spectra.py', import.meta.url))
 
@@ -31,11 +32,11 @@ const lengths = [
 ]
 
 // Source: numpy.fft.rfft (pocketfft), a general-purpose library, run in the same test.
-describe.skipIf(!hasNumpy)(
+describe.skipIf(python === null)(
   'the real transform beside numpy.fft.rfft (skipped without numpy and scipy)',
   () => {
-    const bytes = hasNumpy
-      ? execFileSync('python3', [script, ...lengths.map(String)], { maxBuffer: 2 ** 28 })
+    const bytes = python
+      ? execFileSync(python, [script, ...lengths.map(String)], { maxBuffer: 2 ** 28 })
       : Buffer.alloc(0)
     const numbers = new Float64Array(
       bytes.buffer.slice(bytes.byteOffset, bytes.byteOffset + bytes.byteLength),

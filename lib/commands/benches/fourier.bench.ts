@@ -5,6 +5,7 @@ import { z } from 'zod'
 
 import { transformReal } from '@/lib/core/fourier/real-transform'
 
+import { pythonWithScipy } from '../python'
 import type { BenchLine } from './bench-line'
 
 const run = promisify(execFile)
@@ -67,6 +68,11 @@ print(best * 1e3)
 `
 
 async function bestOfNumpy(length: number): Promise<number> {
-  const { stdout } = await run('python3', ['-c', script, String(length), String(repeats)])
+  const { stdout } = await run(pythonWithScipy() ?? 'python3', [
+    '-c',
+    script,
+    String(length),
+    String(repeats),
+  ])
   return z.coerce.number().positive().parse(stdout.trim())
 }

@@ -20,7 +20,7 @@ export type Sidebands = {
 /** Sidebands so far outside the sweep are left out, as a multiple of its width. */
 const outside = 1.5
 
-/** The width that holds 98 % of the power of a line swept by a sine, W + 2 f_m. J. R. Carson 1922 (from memory). */
+/** The width that holds about 98 % of the power of a line swept by a sine, W + 2 f_m. J. R. Carson 1922 (from memory). */
 export const carsonWidth = ({ width, rate }: SpreadLine): number => width + 2 * rate
 
 /**
