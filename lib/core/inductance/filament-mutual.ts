@@ -29,7 +29,9 @@ export function filamentMutual(a: Segment, b: Segment): Result<number, Inductanc
   const mutual = (vacuumPermeability / (4 * Math.PI)) * neumannIntegral(first, second)
   return Number.isFinite(mutual)
     ? ok(mutual)
-    : err(refusal('overlap', 'The segments overlap on one line: their mutual inductance has no finite value.'))
+    : err(
+        refusal('overlap', 'The segments overlap on one line: their mutual inductance has no finite value.'),
+      )
 }
 
 export function filamentOf({ start, end }: Segment): Filament {

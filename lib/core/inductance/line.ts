@@ -4,12 +4,20 @@ import { freeSpaceImpedance, speedOfLight, vacuumPermeability } from '../physics
 export const roundPair = (spacing: number, radius: number): number =>
   (vacuumPermeability / Math.PI) * Math.acosh(spacing / (2 * radius))
 
+/** The same for thin wires, of which each leaves the current of the other in place: L′ = (µ₀/π) ln(s/r), H/m. */
+export const roundPairThin = (spacing: number, radius: number): number =>
+  (vacuumPermeability / Math.PI) * Math.log(spacing / radius)
+
 /** The same for current spread evenly over both wires: L′ = (µ₀/π)(ln(s/r) + ¼), H/m. */
 export const roundPairUniform = (spacing: number, radius: number): number =>
   (vacuumPermeability / Math.PI) * (Math.log(spacing / radius) + 1 / 4)
 
 /** A round wire with its centre at a height over a perfect plane: L′ = (µ₀/2π) acosh(h/r), H/m; half of the pair 2h. */
 export const wireOverPlane = (height: number, radius: number): number => roundPair(2 * height, radius) / 2
+
+/** The same for a thin wire: L′ = (µ₀/2π) ln(2h/r), H/m. */
+export const wireOverPlaneThin = (height: number, radius: number): number =>
+  roundPairThin(2 * height, radius) / 2
 
 /**
  * A thin strip over a perfect plane, L′ = Z₀/c of the line in air, H/m:

@@ -14,6 +14,17 @@ export const circularLoop = (radius: number, wireRadius: number, model: CurrentM
   vacuumPermeability * radius * (Math.log((8 * radius) / wireRadius) - 2 + internalTerm(model))
 
 /**
+ * The same for even current to the second order of r/a: µ₀ a {ln(8a/r) − 7/4 + (r²/8a²)[ln(8a/r) + 1/3]}, henries; to
+ * 3e-6 at r/a = 0.2. Source: Lord Rayleigh, W. D. Niven 1881, in E. B. Rosa, F. W. Grover, Bulletin of the Bureau of
+ * Standards 8 (1912) 1 (from memory).
+ */
+export function circularLoopSecondOrder(radius: number, wireRadius: number): number {
+  const logarithm = Math.log((8 * radius) / wireRadius)
+  const second = ((wireRadius / radius) ** 2 / 8) * (logarithm + 1 / 3)
+  return vacuumPermeability * radius * (logarithm - 7 / 4 + second)
+}
+
+/**
  * A rectangular loop of round wire with centre lines W × H and diagonal D, Y = 0 or ¼:
  *
  *     L = µ₀/π · [(W + H) ln(2WH/r) − W ln(W + D) − H ln(H + D) − (2 − Y)(W + H) + 2D]

@@ -64,8 +64,6 @@ function alongTheShorter({ length1, length2, distance, offset }: ParallelFilamen
   const ends = [...new Set(breaks)].sort((a, b) => a - b)
   return ends.slice(1).reduce((sum, end, index) => {
     const start = ends[index] ?? end
-    return (
-      sum + tanhSinh(start, end, (at) => filamentPotential(offset + at, length1 - offset - at, distance))
-    )
+    return sum + tanhSinh(start, end, (at) => filamentPotential(offset + at, length1 - offset - at, distance))
   }, 0)
 }

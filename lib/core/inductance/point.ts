@@ -4,6 +4,9 @@ export type Point3 = readonly [x: number, y: number, z: number]
 /** A point in a plane, metres. */
 export type Point2 = readonly [x: number, y: number]
 
+/** A straight piece in a plane. */
+export type Side = { readonly from: Point2; readonly to: Point2 }
+
 export const difference = (a: Point3, b: Point3): Point3 => [a[0] - b[0], a[1] - b[1], a[2] - b[2]]
 
 export const sum = (a: Point3, b: Point3): Point3 => [a[0] + b[0], a[1] + b[1], a[2] + b[2]]

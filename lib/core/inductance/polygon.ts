@@ -1,5 +1,5 @@
 import { err, ok, type Result } from '../result'
-import type { Point2 } from './point'
+import type { Point2, Side } from './point'
 import { refusal, type InductanceRefusal } from './refusal'
 import { separationSquared } from './segment-distance'
 
@@ -10,8 +10,6 @@ export type Polygon = {
   readonly area: number
   readonly perimeter: number
 }
-
-export type Side = { readonly from: Point2; readonly to: Point2 }
 
 export const sidesOf = (corners: readonly Point2[]): readonly Side[] =>
   corners.map((from, index) => ({ from, to: corners[(index + 1) % corners.length] ?? from }))
@@ -26,7 +24,8 @@ const lengthOf = ({ from, to }: Side): number => Math.hypot(to[0] - from[0], to[
 export function simplePolygon(corners: readonly Point2[]): Result<Polygon, InductanceRefusal> {
   if (corners.length < 3) return err(refusal('too_few_points', 'A loop needs at least three corners.'))
   const broken = corners.findIndex((corner) => !corner.every(Number.isFinite))
-  if (broken >= 0) return err(refusal('not_finite', `Corner ${broken + 1} has a coordinate that is no number.`))
+  if (broken >= 0)
+    return err(refusal('not_finite', `Corner ${broken + 1} has a coordinate that is no number.`))
   const sides = sidesOf(corners)
   const perimeter = sides.reduce((sum, side) => sum + lengthOf(side), 0)
   const short = sides.findIndex((side) => !(lengthOf(side) > 1e-12 * perimeter))

@@ -6,6 +6,10 @@ const perHeight = vacuumPermeability / (2 * Math.PI)
 export const viaPair = (height: number, spacing: number, diameter: number): number =>
   2 * perHeight * height * Math.acosh(spacing / diameter)
 
+/** The same with thin vias: L = (µ₀ h/π) ln(2s/d); high by 1 % at s/d = 2.6. */
+export const viaPairThin = (height: number, spacing: number, diameter: number): number =>
+  2 * perHeight * height * Math.log((2 * spacing) / diameter)
+
 /**
  * A signal via amid n return vias on a circle of radius s that share its current equally, thin against s:
  *
