@@ -7,7 +7,12 @@ const leastRun = 4
 const steepness = 3
 
 /** The last sample of the last flat, cut-off peak at either extreme from `from` to `to`; null where no peak is cut off. */
-export function lastClipped(values: Float64Array, from: number, to: number): number | null {
+export function lastClipped(
+  values: Float64Array,
+  from: number,
+  to: number,
+  step: number = converterStep(values),
+): number | null {
   let high = -Infinity
   let low = Infinity
   for (let index = from; index < to; index += 1) {
@@ -15,7 +20,6 @@ export function lastClipped(values: Float64Array, from: number, to: number): num
     if (value > high) high = value
     if (value < low) low = value
   }
-  const step = converterStep(values)
   let clipped: number | null = null
   for (let index = from; index < to; index += 1) {
     const value = values[index]

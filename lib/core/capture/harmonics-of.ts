@@ -1,0 +1,104 @@
+import { longestSmoothLength } from '../fourier/radices'
+import { transformReal } from '../fourier/real-transform'
+import { blackmanHarris4, rectangular, underWindow, type CosineWindow } from '../spectrum/cosine-window'
+import { levelOfPeak } from '../spectrum/level'
+import { windowResponse } from '../spectrum/window-response'
+import type { Harmonic, Harmonics } from './capture-analysis'
+import { medianOf } from './median'
+
+/** From so many periods on, neighbouring harmonics lie outside each other's main lobe of the window. */
+const periodsForWindow = 9
+
+const mostHarmonics = 4000
+
+/** A sine stands above the noise from so many times its rms in a bin on; by chance one bin of 10⁵ does. */
+const aboveNoise = 3.4
+
+/** Bins asked for the noise. */
+const asked = 4000
+
+type Lines = {
+  /** Interleaved transform, and what turns it into peak values. */
+  readonly transform: Float64Array
+  readonly scale: number
+  readonly window: CosineWindow
+  /** Bins from one harmonic to the next. */
+  readonly spacing: number
+}
+
+/**
+ * The harmonics of a fundamental of `period` samples, amplitude-correct: 2|X|/Σw at the bin nearest to each, over the
+ * closed form of the window at the distance of the harmonic from the middle of that bin. From nine periods on under a
+ * four-term Blackman-Harris window; below that from a whole number of periods without a window. The noise floor is that of
+ * the bins midway between harmonics. `period` and `sampleNoise` in samples and in the unit of the record.
+ */
+export function harmonicsOf(
+  values: Float64Array,
+  period: number,
+  intervalSeconds: number,
+  sampleNoise: number,
+): Harmonics | null {
+  const lines = linesOf(values, period)
+  if (lines === null) return null
+  const floor = aboveNoise * noiseBetween(lines, sampleNoise)
+  const count = Math.min(mostHarmonics, Math.floor(period / 2 - 0.5))
+  const list = Array.from({ length: count }, (_, index): Harmonic => {
+    const order = index + 1
+    const amplitude = amplitudeAt(lines, order * lines.spacing)
+    return {
+      order,
+      frequency: order / (period * intervalSeconds),
+      amplitude,
+      level: amplitude > floor ? levelOfPeak(amplitude) : null,
+    }
+  })
+  return { list, floorAmplitude: floor, floorLevel: floor > 0 ? levelOfPeak(floor) : -Infinity }
+}
+
+function linesOf(values: Float64Array, period: number): Lines | null {
+  const periods = values.length / period
+  if (periods >= periodsForWindow) {
+    const length = longestSmoothLength(values.length)
+    const { coefficients } = blackmanHarris4
+    const transform = transformReal(underWindow(values.subarray(0, length), coefficients))
+    return {
+      transform,
+      scale: scaleOf(length, coefficients[0] ?? 1),
+      window: blackmanHarris4,
+      spacing: length / period,
+    }
+  }
+  const whole = Math.floor(periods + 0.5 / period)
+  const length = Math.min(values.length, Math.round(whole * period))
+  if (whole < 1) return null
+  const transform = transformReal(values.subarray(0, length))
+  return { transform, scale: scaleOf(length, 1), window: rectangular, spacing: length / period }
+}
+
+const scaleOf = (length: number, gain: number): number => 2 / (length * gain)
+
+function binAmplitude({ transform, scale }: Lines, bin: number): number {
+  const real = transform[2 * bin] ?? 0
+  const imaginary = transform[2 * bin + 1] ?? 0
+  return scale * Math.sqrt(real * real + imaginary * imaginary)
+}
+
+function amplitudeAt(lines: Lines, position: number): number {
+  const bin = Math.round(position)
+  return binAmplitude(lines, bin) / windowResponse(lines.window.coefficients, position - bin)
+}
+
+/**
+ * Rms of the noise in a bin: the median of bins midway between harmonics, which for noise is √(ln 2) of it; of a single
+ * period, which has no bins between, that of the noise from sample to sample.
+ */
+function noiseBetween(lines: Lines, sampleNoise: number): number {
+  if (lines.spacing < 1.9) return sampleNoise * Math.sqrt(2 * lines.scale)
+  const gaps = Math.floor(lines.transform.length / 2 / lines.spacing) - 1
+  const stride = Math.max(1, Math.floor(gaps / asked))
+  const sizes: number[] = []
+  for (let gap = 0; gap < gaps; gap += stride) {
+    sizes.push(binAmplitude(lines, Math.round((gap + 0.5) * lines.spacing)))
+  }
+  return sizes.length === 0 ? 0 : medianOf(sizes) / Math.sqrt(Math.LN2)
+}

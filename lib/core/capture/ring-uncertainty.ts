@@ -1,0 +1,59 @@
+import type { Ring } from '../ring/ring-measurement'
+import { solveLinear } from '../ring/solve-linear'
+
+/** Longer stretches are summed at every n-th sample, which stands for n. */
+const mostPoints = 2000
+
+export type RingDeviations = {
+  /** Standard deviation of f_d, in Hz. */
+  readonly frequency: number
+  /** Standard deviation of ζ. */
+  readonly dampingRatio: number
+}
+
+/**
+ * Standard deviations of the frequency and damping of one fitted ring: the diagonal of s² (JᵀJ)⁻¹, J the derivatives of
+ * level + e^(−αt)(a cos ωt + b sin ωt) by its five parameters and s the rms of what the fit leaves over. Theory of
+ * non-linear least squares; the noise is taken as independent from sample to sample. Null where JᵀJ is singular.
+ */
+export function ringDeviations(
+  { fit, dampedFrequency }: Ring,
+  intervalSeconds: number,
+): RingDeviations | null {
+  const count = Math.round((fit.endSeconds - fit.startSeconds) / intervalSeconds) + 1
+  const stride = Math.max(1, Math.floor(count / mostPoints))
+  const omega = 2 * Math.PI * dampedFrequency * intervalSeconds
+  const decay = fit.decayRate * intervalSeconds
+  const matrix = Array.from({ length: 5 }, () => [0, 0, 0, 0, 0])
+  for (let time = 0; time < count; time += stride) {
+    const envelope = Math.exp(-decay * time)
+    const angle = omega * time + fit.phase
+    const swing = fit.amplitude * envelope * Math.cos(angle)
+    const quadrature = fit.amplitude * envelope * Math.sin(angle)
+    addProduct(matrix, [
+      1,
+      swing / fit.amplitude,
+      quadrature / fit.amplitude,
+      time * swing,
+      time * quadrature,
+    ])
+  }
+  const varianceOf = (row: number) => {
+    const unit = [0, 0, 0, 0, 0].map((_, index) => (index === row ? 1 : 0))
+    return (solveLinear(matrix, unit)?.[row] ?? NaN) / stride
+  }
+  const scale = fit.residualRms / intervalSeconds
+  const ofDecay = scale * Math.sqrt(varianceOf(3))
+  const ofOmega = scale * Math.sqrt(varianceOf(4))
+  if (!Number.isFinite(ofDecay + ofOmega)) return null
+  const natural = Math.hypot(2 * Math.PI * dampedFrequency, fit.decayRate)
+  return { frequency: ofOmega / (2 * Math.PI), dampingRatio: ofDecay / natural }
+}
+
+function addProduct(matrix: number[][], gradient: readonly number[]): void {
+  matrix.forEach((row, index) => {
+    for (let column = 0; column < row.length; column += 1) {
+      row[column] = (row[column] ?? 0) + (gradient[index] ?? 0) * (gradient[column] ?? 0)
+    }
+  })
+}

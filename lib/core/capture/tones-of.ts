@@ -1,0 +1,39 @@
+import { blackmanHarris4 } from '../spectrum/cosine-window'
+import { findTones } from '../spectrum/find-tones'
+import { levelOfPeak } from '../spectrum/level'
+import { amplitudeSpectrum, type AmplitudeSpectrum } from '../spectrum/record-spectrum'
+import type { Tones } from './capture-analysis'
+import { medianOf } from './median'
+
+/** A sine stands above the noise from so many times its rms in a bin on; by chance one bin of 10⁹ does. */
+const aboveNoise = 4.6
+
+/** Sines so far below the strongest one, as a ratio, are not listed: 90 dB, where the side lobes of the window begin. */
+const weakest = 10 ** (-90 / 20)
+
+const mostTones = 200
+
+/** Bins asked for the noise. */
+const asked = 20_000
+
+/**
+ * The sines of a record: peaks of its amplitude spectrum under a four-term Blackman-Harris window (none where the record
+ * holds whole periods) that stand above the noise, the strongest 200 of them, by rising frequency. Null where none does.
+ */
+export function tonesOf(values: Float64Array, intervalSeconds: number): Tones | null {
+  const spectrum = amplitudeSpectrum(values, intervalSeconds, blackmanHarris4)
+  if (!spectrum.ok) return null
+  const strongest = spectrum.value.amplitudes.subarray(1).reduce((most, value) => Math.max(most, value), 0)
+  if (!(strongest > 0)) return null
+  const floor = Math.max(aboveNoise * noiseOf(spectrum.value), weakest * strongest)
+  const list = findTones(spectrum.value, { floor, mostTones })
+  return list.length === 0 ? null : { list, floorLevel: levelOfPeak(floor) }
+}
+
+/** Rms of the noise in a bin, from the median of all, which sines hardly move. */
+function noiseOf({ amplitudes }: AmplitudeSpectrum): number {
+  const stride = Math.max(1, Math.floor(amplitudes.length / asked))
+  const sizes: number[] = []
+  for (let bin = 1; bin < amplitudes.length; bin += stride) sizes.push(amplitudes[bin] ?? 0)
+  return sizes.length === 0 ? 0 : medianOf(sizes) / Math.sqrt(Math.LN2)
+}
