@@ -1,5 +1,6 @@
 import { vacuumPermeability } from '../physics/constants'
-import { alignedFilaments, parallelFilaments } from './parallel-filaments'
+import { gaussRule } from './gauss-legendre'
+import { parallelFilaments } from './parallel-filaments'
 import { tanhSinh } from './tanh-sinh'
 
 /** A straight bar of rectangular section; current runs along its length. Metres. */
@@ -20,13 +21,29 @@ export type BarOffset = { readonly across: number; readonly up: number; readonly
  */
 export function barSelf({ width, thickness, length }: Bar): number {
   const wedge = (near: number, far: number): number =>
-    tanhSinh(0, 1, (_, slope) => {
-      const reach = Math.hypot(near, far * slope)
-      return tanhSinh(0, 1, (_at, out, rest) => {
-        return out * rest * (1 - out * slope) * alignedFilaments(length, out * reach)
-      })
-    })
-  return 4 * (wedge(width, thickness) + wedge(thickness, width))
+    tanhSinh(0, 1, (_, slope) => wedgeAlong(length, Math.hypot(near, far * slope), slope))
+  return (vacuumPermeability / Math.PI) * 2 * (wedge(width, thickness) + wedge(thickness, width))
+}
+
+/**
+ * ∫₀¹ u (1 − u)(1 − su) M(l, hu) du · 2π/µ₀ along one ray of a wedge. The part − l ln u of the filament formula is
+ * integrated in closed form; the rest is smooth for a bar longer than the ray.
+ */
+function wedgeAlong(length: number, reach: number, slope: number): number {
+  const [p, logarithm] = [length / reach, 1 / 4 - (1 + slope) / 9 + slope / 16]
+  const rest = (u: number): number => {
+    const distance = Math.hypot(p, u)
+    return u * (1 - u) * (1 - slope * u) * (Math.log(p + distance) - p / (distance + u))
+  }
+  return length * (logarithm + (p > 1.5 ? gaussOnUnit(rest) : tanhSinh(0, 1, rest)))
+}
+
+const { nodes, weights } = gaussRule(14)
+
+function gaussOnUnit(f: (u: number) => number): number {
+  let sum = 0
+  for (const [index, node] of nodes.entries()) sum += (weights[index] ?? 0) * f((1 + node) / 2)
+  return sum / 2
 }
 
 /**

@@ -21,8 +21,8 @@ export function contourOffsetLoop(polygon: Polygon, { meanDistance, imageDistanc
   return perFourPi * pairSum(polygon, imageDistance === undefined ? [free] : [free, imageAt(imageDistance)])
 }
 
-/** Mutual inductance of a loop and a copy of it at a height normal to its plane, henries: that of its mirror image. */
-export const imageMutual = (polygon: Polygon, distance: number): number =>
+/** Mutual inductance of a loop and a copy of it, displaced normal to its plane, henries: so that of its mirror image. */
+export const mutualWithCopy = (polygon: Polygon, distance: number): number =>
   perFourPi * pairSum(polygon, [{ height: distance, sign: 1 }])
 
 const imageAt = (height: number): Copy => ({ height, sign: -1 })
