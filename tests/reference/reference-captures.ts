@@ -5,6 +5,8 @@ import { z } from 'zod'
 import type { Capture } from '@/lib/core/waveform/capture'
 import { parseCapture } from '@/lib/core/waveform/parse-capture'
 
+import { captureBytes } from './capture-bytes'
+
 const truthSchema = z.object({
   ring_frequency: z.number().nullable().default(null),
   natural_frequency: z.number().nullable().default(null),
@@ -34,8 +36,6 @@ export type Truth = z.infer<typeof truthSchema>
 export type CaptureDescription = z.infer<typeof descriptionSchema>
 
 const folder = new URL('./captures/', import.meta.url)
-
-export const captureBytes = (file: string): Uint8Array => new Uint8Array(readFileSync(new URL(file, folder)))
 
 export function describedCapture(file: string): CaptureDescription {
   const text = readFileSync(new URL(file.replace(/\.\w+$/u, '.json'), folder), 'utf8')
