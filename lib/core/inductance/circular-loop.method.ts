@@ -1,13 +1,14 @@
 import { defineMethod, noSolution } from '../method/method'
 import { main, step } from '../method/result-value'
 import { err, ok } from '../result'
+import { conductingRing } from './conducting-ring'
 import { currentModelSpread, derivedHere, lengthInput, loopCautions } from './inductance-inputs'
-import { circularLoop } from './loop'
+import { circularLoop, circularLoopSecondOrder } from './loop'
 
 /** Inductance of a circle of round wire. */
 export const circularLoopInductance = defineMethod({
   id: 'circular-loop-inductance',
-  version: 1,
+  version: 2,
   title: 'Inductance of a circular loop',
   purpose: 'Gives the inductance of a circle of round wire, far from other conductors.',
   inputs: {
@@ -17,6 +18,8 @@ export const circularLoopInductance = defineMethod({
   formulas: [
     'Current on the surface (skin effect): L = µ₀ a (ln(8a/r) − 2)',
     'Current evenly spread: L = µ₀ a (ln(8a/r) − 7/4)',
+    'Evenly spread, to the second order: L = µ₀ a {ln(8a/r) − 7/4 + (r²/8a²)[ln(8a/r) + 1/3]}',
+    'Perfect conductor, exact: the flux through every circle on the wire’s surface is the same, solved in toroidal coordinates',
   ],
   notes: [
     'The flux through the circle at the inner edge of the wire looks exact but is 3 to 11 % low: it is a mutual inductance, not the self-inductance.',
@@ -26,6 +29,11 @@ export const circularLoopInductance = defineMethod({
   sources: [
     {
       citation: 'J. C. Maxwell, A Dynamical Theory of the Electromagnetic Field, 1865, art. 112–113',
+      standing: 'published',
+    },
+    {
+      citation:
+        'E. B. Rosa, F. W. Grover, Formulas and Tables for the Calculation of Mutual and Self-Inductance, Bulletin of the Bureau of Standards 8, 1912 (from memory)',
       standing: 'published',
     },
     derivedHere,
@@ -42,6 +50,20 @@ export const circularLoopInductance = defineMethod({
       results: [
         main('surface', 'Inductance, current on the surface', 'L', 'H', surface),
         main('uniform', 'Inductance, current evenly spread', 'L', 'H', uniform),
+        main(
+          'exact',
+          'Inductance of a perfect conductor, exact',
+          'L',
+          'H',
+          conductingRing(radius, wireRadius),
+        ),
+        step(
+          'uniformSecondOrder',
+          'Current evenly spread, to the second order',
+          'L',
+          'H',
+          circularLoopSecondOrder(radius, wireRadius),
+        ),
         currentModelSpread(surface, uniform),
         step('thinness', 'Thickness of the wire', 'r/a', '', wireRadius / radius),
       ],
@@ -51,7 +73,7 @@ export const circularLoopInductance = defineMethod({
           passed: isThin,
           sentence: isThin
             ? 'The wire is thin: r/a is at most 0.1, and the surface form at most 1.1 % high.'
-            : 'r/a is above 0.1: the surface form is more than 1 % high, 4 % at 0.2.',
+            : 'r/a is above 0.1: the surface form is more than 1 % high, 4 % at 0.2. Take the exact value.',
         },
       ],
       figures: [],

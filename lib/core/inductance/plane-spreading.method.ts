@@ -1,5 +1,6 @@
 import { defineMethod, noSolution } from '../method/method'
 import { main, step } from '../method/result-value'
+import { vacuumPermeability } from '../physics/constants'
 import { err, ok } from '../result'
 import { derivedHere, lengthInput, loopCautions } from './inductance-inputs'
 import { planeSpreading, viaPair } from './via'
@@ -42,13 +43,7 @@ export const planeSpreadingInductance = defineMethod({
       results: [
         main('ring', 'To a ring of parts', 'L', 'H', planeSpreading(height, outerRadius, diameter / 2)),
         main('via', 'To a second via', 'L', 'H', viaPair(height, outerRadius, diameter)),
-        step(
-          'perSquare',
-          'A square of the planes',
-          'µ₀ h',
-          'H',
-          planeSpreading(height, Math.E, 1) * 2 * Math.PI,
-        ),
+        step('perSquare', 'A square of the planes', 'µ₀ h', 'H', vacuumPermeability * height),
       ],
       choices: [],
       validity: [

@@ -77,8 +77,8 @@ export const viaArrayInductance = defineMethod({
         {
           passed: isLoose,
           sentence: isLoose
-            ? 'The vias are at least three diameters apart: good to 0.3 %.'
-            : 'Some vias are nearer than three diameters: the current is no longer even around their barrels, and the result is about a per cent high.',
+            ? 'The vias are at least three diameters apart: good to about 0.3 %.'
+            : 'Some vias are nearer than three diameters: the current is no longer even around their barrels, which leaves about a per cent open.',
         },
       ],
       figures: [],

@@ -3,11 +3,21 @@ import { smallLoopEmission } from '../emission/small-loop.method'
 import { filterCorner } from '../filter/filter-corner.method'
 import { filterDamping } from '../filter/filter-damping.method'
 import { circularLoopInductance } from '../inductance/circular-loop.method'
+import { coplanarPairInductance } from '../inductance/coplanar-pair.method'
 import { loopVoltage } from '../inductance/loop-voltage.method'
+import { partialInductance } from '../inductance/partial-inductance.method'
+import { planeSpreadingInductance } from '../inductance/plane-spreading.method'
+import { polygonLoopInductance } from '../inductance/polygon-loop.method'
 import { rectangularLoopInductance } from '../inductance/rectangular-loop.method'
 import { traceOverPlaneInductance } from '../inductance/trace-over-plane.method'
+import { viaArrayInductance } from '../inductance/via-array.method'
+import { viaPartialInductance } from '../inductance/via-partial.method'
 import { viaReturnInductance } from '../inductance/via-return.method'
 import { wirePairInductance } from '../inductance/wire-pair.method'
+import { distanceConversion } from '../limits/distance-conversion.method'
+import { scanMargin } from '../limits/scan-margin.method'
+import { receiverPulseResponse } from '../receiver/pulse-response.method'
+import { spreadSpectrumEffect } from '../receiver/spread-spectrum.method'
 import type { Result } from '../result'
 import { planeShield } from '../shielding/plane-shield.method'
 import { stitchingDistance } from '../shielding/stitching.method'
@@ -15,7 +25,11 @@ import { rcSnubber } from '../snubber/rc-snubber.method'
 import { rcdClamp } from '../snubber/rcd-clamp.method'
 import { ringInductance } from '../snubber/ring-inductance.method'
 import { ringParasitics } from '../snubber/ring-parasitics.method'
+import { decibelConversion } from '../spectrum/decibel-conversion.method'
+import { harmonicAttribution } from '../spectrum/harmonic-attribution.method'
+import { mixingProductsMethod } from '../spectrum/mixing-products.method'
 import { pulseTrainSpectrum } from '../spectrum/pulse-train.method'
+import { spectralWindow } from '../spectrum/spectral-window.method'
 import type { InputDefinitions, RawInput } from './input-definition'
 import type { Method, MethodError } from './method'
 import type { RawTolerance } from './read-tolerances'
@@ -40,16 +54,32 @@ export const methodGroups: readonly MethodGroup[] = [
   },
   {
     title: 'Spectrum and limits',
-    methods: [register(pulseTrainSpectrum)],
+    methods: [
+      register(pulseTrainSpectrum),
+      register(scanMargin),
+      register(harmonicAttribution),
+      register(mixingProductsMethod),
+      register(spreadSpectrumEffect),
+      register(receiverPulseResponse),
+      register(spectralWindow),
+      register(decibelConversion),
+      register(distanceConversion),
+    ],
   },
   {
     title: 'Inductance',
     methods: [
+      register(polygonLoopInductance),
       register(rectangularLoopInductance),
       register(circularLoopInductance),
       register(traceOverPlaneInductance),
       register(wirePairInductance),
+      register(coplanarPairInductance),
+      register(partialInductance),
       register(viaReturnInductance),
+      register(viaPartialInductance),
+      register(viaArrayInductance),
+      register(planeSpreadingInductance),
       register(loopVoltage),
     ],
   },
