@@ -7,6 +7,8 @@ import { parseCapture } from '@/lib/core/waveform/parse-capture'
 
 import { captureBytes } from './capture-bytes'
 
+export { captureBytes } from './capture-bytes'
+
 const truthSchema = z.object({
   ring_frequency: z.number().nullable().default(null),
   natural_frequency: z.number().nullable().default(null),

@@ -9,6 +9,10 @@ import { medianOf } from './median'
 /** From so many periods on, neighbouring harmonics lie outside each other's main lobe of the window. */
 const periodsForWindow = 9
 
+/** So many samples are enough where they hold so many periods: noise falls by 3 dB only for twice as many. */
+const samplesEnough = 2 ** 20
+const periodsEnough = 100
+
 const mostHarmonics = 4000
 
 /** A sine stands above the noise from so many times its rms in a bin on; by chance one bin of 10⁵ does. */
@@ -58,7 +62,8 @@ export function harmonicsOf(
 function linesOf(values: Float64Array, period: number): Lines | null {
   const periods = values.length / period
   if (periods >= periodsForWindow) {
-    const length = longestSmoothLength(values.length)
+    const isEnough = values.length > samplesEnough && samplesEnough / period >= periodsEnough
+    const length = isEnough ? samplesEnough : longestSmoothLength(values.length)
     const { coefficients } = blackmanHarris4
     const transform = transformReal(underWindow(values.subarray(0, length), coefficients))
     return {

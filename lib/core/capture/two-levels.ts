@@ -1,7 +1,9 @@
 import type { StateLevels } from '../ring/ring-measurement'
 import type { ValueSummary } from './value-range'
 
+/** Bins for the modes, and how many finer ones in each for the mean around a mode. */
 const bins = 512
+const finer = 16
 
 /** Two levels lie at least this part of the range apart. */
 const apart = 0.1
@@ -24,26 +26,43 @@ const leastSteps = 3
 export function twoLevels(values: Float64Array, summary: ValueSummary, noise: number): StateLevels | null {
   const range = summary.maximum - summary.minimum
   if (!(range > 0)) return null
-  const counts = histogramOf(values, summary.minimum, range)
+  const histogram = histogramOf(values, summary.minimum, range)
+  const counts = coarseCounts(histogram)
   const first = modeOf(counts, () => true)
   const second = modeOf(counts, (bin) => Math.abs(bin - first) >= apart * bins)
-  const centreOf = (bin: number) => summary.minimum + ((bin + 0.5) / bins) * range
-  const reach = Math.max(nearMode * range, 3 * noise)
-  const levels = [first, second].map((bin) => meanNear(values, centreOf(bin), reach)).sort((a, b) => a - b)
-  const [base = 0, top = 0] = levels
+  const reach = Math.max(nearMode, (3 * noise) / range) * bins * finer
+  const [base = 0, top = 0] = [first, second]
+    .map((bin) => summary.minimum + meanNear(histogram, (bin + 0.5) * finer, reach))
+    .sort((a, b) => a - b)
   const least = Math.max(leastDeviations * noise, leastSteps * summary.converterStep)
   return top - base >= least ? { base, top } : null
 }
 
-function histogramOf(values: Float64Array, minimum: number, range: number): Float64Array {
-  const counts = new Float64Array(bins)
-  const scale = bins / range
+/** How many samples are in a bin, and the sum of how far they lie above the minimum. */
+type Histogram = { readonly counts: Float64Array; readonly sums: Float64Array }
+
+function histogramOf(values: Float64Array, minimum: number, range: number): Histogram {
+  const size = bins * finer
+  const counts = new Float64Array(size)
+  const sums = new Float64Array(size)
+  const scale = size / range
   for (const value of values) {
-    const bin = Math.min(bins - 1, ((value - minimum) * scale) | 0)
+    const above = value - minimum
+    const bin = Math.min(size - 1, (above * scale) | 0)
     counts[bin] = (counts[bin] ?? 0) + 1
+    sums[bin] = (sums[bin] ?? 0) + above
   }
-  // Three bins together, so that a level between two of them counts as much as one within.
-  return counts.map((count, bin) => count + ((counts[bin - 1] ?? 0) + (counts[bin + 1] ?? 0)) / 2)
+  return { counts, sums }
+}
+
+/** A bin with half of each of its neighbours, so that a level between two of them counts as much as one within. */
+function coarseCounts({ counts }: Histogram): Float64Array {
+  const plain = new Float64Array(bins)
+  counts.forEach((count, index) => {
+    const bin = Math.floor(index / finer)
+    plain[bin] = (plain[bin] ?? 0) + count
+  })
+  return plain.map((count, bin) => count + ((plain[bin - 1] ?? 0) + (plain[bin + 1] ?? 0)) / 2)
 }
 
 function modeOf(counts: Float64Array, isAllowed: (bin: number) => boolean): number {
@@ -54,19 +73,28 @@ function modeOf(counts: Float64Array, isAllowed: (bin: number) => boolean): numb
   return mode
 }
 
-/** The mean of the samples near a mode; a second pass starts from the first one's mean. */
-function meanNear(values: Float64Array, mode: number, reach: number): number {
+/**
+ * The mean of the samples within `reach` bins of a mode, above the minimum; later passes start from the bin of the mean
+ * before.
+ */
+function meanNear({ counts, sums }: Histogram, mode: number, reach: number): number {
   let centre = mode
-  for (let pass = 0; pass < 2; pass += 1) {
+  let mean = 0
+  for (let pass = 0; pass < 3; pass += 1) {
     let sum = 0
     let count = 0
-    for (const value of values) {
-      const away = value - centre
-      if (away > reach || away < -reach) continue
-      sum += away
-      count += 1
+    let place = 0
+    const from = Math.max(0, Math.round(centre - reach))
+    const to = Math.min(counts.length - 1, Math.round(centre + reach))
+    for (let bin = from; bin <= to; bin += 1) {
+      const here = counts[bin] ?? 0
+      sum += sums[bin] ?? 0
+      count += here
+      place += here * (bin + 0.5)
     }
-    if (count > 0) centre += sum / count
+    if (count === 0) return mean
+    mean = sum / count
+    centre = place / count
   }
-  return centre
+  return mean
 }

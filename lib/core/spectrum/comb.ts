@@ -1,5 +1,10 @@
 /** A source of harmonics: a switching converter, a clock. */
-export type CombSource = { readonly name: string; readonly frequency: number }
+export type CombSource = {
+  readonly name: string
+  readonly frequency: number
+  /** Of this source, in place of the common one. */
+  readonly ppm?: number
+}
 
 /** A line of a source that a peak may be. */
 export type CombCandidate = {
@@ -16,10 +21,9 @@ export type CombTolerance = {
   readonly hertz: number
   /** Harmonics above this one are not considered. */
   readonly mostHarmonic?: number
+  /** Lines of one source for one peak; more than a few say nothing. 1000 where left out. */
+  readonly mostPerSource?: number
 }
-
-/** More lines of one source than this within the tolerance of a peak say nothing; the first ones are listed. */
-const mostPerSource = 1000
 
 /**
  * Every line that a peak may be, in the order of the sources: |p − h f| ≤ h f · ppm · 10⁻⁶ + tolerance, h ≥ 1. None is an
@@ -33,10 +37,10 @@ export function candidatesOf(
   const found: CombCandidate[] = []
   for (const source of sources) {
     const { frequency } = source
-    const share = tolerance.ppm * 1e-6
+    const share = (source.ppm ?? tolerance.ppm) * 1e-6
     const first = Math.max(1, Math.floor((peak - tolerance.hertz) / (frequency * (1 + share))))
     const end = share < 1 ? Math.ceil((peak + tolerance.hertz) / (frequency * (1 - share))) : Infinity
-    const last = Math.min(end, tolerance.mostHarmonic ?? Infinity, first + mostPerSource)
+    const last = Math.min(end, tolerance.mostHarmonic ?? Infinity, first + (tolerance.mostPerSource ?? 1000))
     for (let harmonic = first; harmonic <= last; harmonic += 1) {
       const line = harmonic * frequency
       const deviation = peak - line
@@ -48,7 +52,7 @@ export function candidatesOf(
 
 /** How far a harmonic of a source may lie from its place, in Hz. */
 export const reachOf = ({ source, harmonic }: CombCandidate, { ppm, hertz }: CombTolerance): number =>
-  harmonic * source.frequency * ppm * 1e-6 + hertz
+  harmonic * source.frequency * (source.ppm ?? ppm) * 1e-6 + hertz
 
 /** Two lines that a measurement could mistake for each other. */
 export type CombClash = {

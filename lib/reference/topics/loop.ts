@@ -13,7 +13,7 @@ import { simplePolygon, type Polygon } from '@/lib/core/inductance/polygon'
 import {
   conductorFits,
   contourOffsetLoop,
-  imageMutual,
+  mutualWithCopy,
   partialSumLoop,
 } from '@/lib/core/inductance/polygon-loop'
 import {
@@ -88,7 +88,7 @@ export const loopTopics: Topics = {
     ({ points, gmd, height }) =>
       withPolygon(points, gmd, height, (polygon) => {
         const free = partialSumLoop(polygon, gmd)
-        const image = imageMutual(polygon, 2 * height)
+        const image = mutualWithCopy(polygon, 2 * height)
         return {
           l_with_plane: free - image,
           l_free_space: free,
