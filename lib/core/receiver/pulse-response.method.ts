@@ -55,6 +55,7 @@ export const receiverPulseResponse = defineMethod({
     if (!readings.ok) return err(noSolution(readings.error.message, 'rate', 'area'))
     const { peak, quasiPeak, average, relative } = readings.value
     const { impulse, noise, width3dB } = coupledStagesBandwidths(band.bandwidth)
+    const isPublished = rate === undefined || rate >= 1
     const isApart = rate === undefined || rate < band.bandwidth / 10
     return ok({
       results: [
@@ -78,8 +79,10 @@ export const receiverPulseResponse = defineMethod({
             : 'The pulse rate comes near the bandwidth: the readings hold for a receiver tuned to a harmonic of the rate, and fall between harmonics.',
         },
         {
-          passed: rate === undefined || rate >= 1,
-          sentence: 'Single pulses and rates from 1 per second are what the published response covers.',
+          passed: isPublished,
+          sentence: isPublished
+            ? 'The published response covers such pulses.'
+            : 'Between single pulses and 1 per second the published response has no value to compare with.',
         },
       ],
       figures: [responseFigure(band)],

@@ -90,7 +90,7 @@ export const spreadSpectrumEffect = defineMethod({
         ),
       ],
       choices: [harmonicTable(rows)],
-      validity: validityOf(line, band),
+      validity: validityOf(line, band, reduction.peak),
       figures: rows.length > 1 ? [harmonicFigure(rows)] : [],
     })
   },
@@ -175,9 +175,10 @@ function harmonicFigure(rows: readonly Row[]): Figure {
   }
 }
 
-function validityOf(line: SpreadLine, { bandwidth }: ReceiverBand): readonly ValidityCheck[] {
+function validityOf(line: SpreadLine, { bandwidth }: ReceiverBand, peak: number): readonly ValidityCheck[] {
   const isWide = line.width > bandwidth
-  const isFast = line.rate * line.width * 2 > bandwidth ** 2
+  const even = evenSpreadReduction(line, coupledStagesBandwidths(bandwidth).noise)
+  const isShared = peak >= even / 2
   return [
     {
       passed: isWide,
@@ -186,10 +187,10 @@ function validityOf(line: SpreadLine, { bandwidth }: ReceiverBand): readonly Val
         : 'The sweep of this harmonic stays within the bandwidth of the receiver: spreading gains nothing here.',
     },
     {
-      passed: isFast,
-      sentence: isFast
-        ? 'The sweep is faster than the filter can follow.'
-        : 'The sweep is slow enough to pass the filter at nearly its full height: peak and quasi-peak gain little, whatever the average shows.',
+      passed: isShared,
+      sentence: isShared
+        ? 'The sweep is fast enough that a peak detector, too, gains most of what the spread power promises.'
+        : 'The sweep passes the filter at nearly its full height: peak and quasi-peak gain far less than the spread power promises.',
     },
   ]
 }

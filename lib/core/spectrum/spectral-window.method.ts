@@ -1,9 +1,9 @@
 import type { Figure } from '../figure/figure'
-import { defineMethod, noSolution, type ChoiceTable } from '../method/method'
+import { defineMethod, noSolution, type ChoiceTable, type ResultValue } from '../method/method'
 import { main, step } from '../method/result-value'
 import { err, ok } from '../result'
 import { cosineWindows, type CosineWindow } from './cosine-window'
-import { windowFigures, windowResponse } from './window-response'
+import { windowFigures, windowResponse, type WindowFigures } from './window-response'
 
 const options = Object.fromEntries(cosineWindows.map(({ id, name }) => [id, name]))
 
@@ -62,28 +62,13 @@ export const spectralWindow = defineMethod({
     },
   ],
   example: { window: 'flat-top-5', sampleRate: '1 GHz', count: '1000000', wanted: '9 kHz' },
-  compute: ({ window, sampleRate, count, wanted }) => {
-    const chosen = cosineWindows.find(({ id }) => id === window)
-    const figures = chosen ? windowFigures(chosen.coefficients) : null
-    if (!chosen || !figures) return err(noSolution('There is no such window.', 'window'))
-    const bin = sampleRate / count
-    const duration = 1 / bin
-    const isEnough = wanted === undefined || figures.noiseBandwidth * bin <= wanted
+  compute: (values) => {
+    const offer = offers.find(({ window }) => window.id === values.window)
+    if (!offer) return err(noSolution('There is no such window.', 'window'))
+    const { sampleRate, count, wanted } = values
+    const isEnough = wanted === undefined || (offer.figures.noiseBandwidth * sampleRate) / count <= wanted
     return ok({
-      results: [
-        main('resolution', 'Resolution bandwidth', 'ENBW', 'Hz', figures.noiseBandwidth * bin),
-        main('scallop', 'Greatest error of a level between bins', '', 'dB', figures.scallopLoss),
-        ...(wanted === undefined
-          ? []
-          : [
-              main('duration', 'Record length for the wanted RBW', 'T', 's', figures.noiseBandwidth / wanted),
-            ]),
-        step('bin', 'Width of a bin', 'f_s/N', 'Hz', bin),
-        step('recorded', 'Length of this record', 'N/f_s', 's', duration),
-        step('width6dB', 'Width at −6 dB', 'B₆', 'Hz', figures.width6dB * bin),
-        step('width3dB', 'Width at −3 dB', 'B₃', 'Hz', figures.width3dB * bin),
-        step('gain', 'Coherent gain', 'a₀', '', figures.coherentGain),
-      ],
+      results: resultsOf(values, offer.figures),
       choices: [windowTable()],
       validity: [
         {
@@ -93,10 +78,38 @@ export const spectralWindow = defineMethod({
             : 'The record is too short for the wanted resolution bandwidth: neighbouring lines run together.',
         },
       ],
-      figures: [responseFigure(chosen)],
+      figures: [responseFigure(offer.window)],
     })
   },
+  computeResults: (values) => {
+    const offer = offers.find(({ window }) => window.id === values.window)
+    return offer
+      ? ok(resultsOf(values, offer.figures))
+      : err(noSolution('There is no such window.', 'window'))
+  },
 })
+
+const offers = cosineWindows.flatMap((window) => {
+  const figures = windowFigures(window.coefficients)
+  return figures ? [{ window, figures }] : []
+})
+
+type Values = { readonly sampleRate: number; readonly count: number; readonly wanted: number | undefined }
+
+function resultsOf({ sampleRate, count, wanted }: Values, figures: WindowFigures): readonly ResultValue[] {
+  const bin = sampleRate / count
+  const needed = wanted === undefined ? undefined : figures.noiseBandwidth / wanted
+  return [
+    main('resolution', 'Resolution bandwidth', 'ENBW', 'Hz', figures.noiseBandwidth * bin),
+    main('scallop', 'Greatest error of a level between bins', 'a_s', 'dB', figures.scallopLoss),
+    ...(needed === undefined ? [] : [main('duration', 'Record length for the wanted RBW', 'T', 's', needed)]),
+    step('bin', 'Width of a bin', 'f_s/N', 'Hz', bin),
+    step('recorded', 'Length of this record', 'N/f_s', 's', count / sampleRate),
+    step('width6dB', 'Width at −6 dB', 'B₆', 'Hz', figures.width6dB * bin),
+    step('width3dB', 'Width at −3 dB', 'B₃', 'Hz', figures.width3dB * bin),
+    step('gain', 'Coherent gain', 'a₀', '', figures.coherentGain),
+  ]
+}
 
 const windowTable = (): ChoiceTable => ({
   title: 'All windows, in bins',
@@ -108,12 +121,14 @@ const windowTable = (): ChoiceTable => ({
     { label: 'B₃', unit: '' },
     { label: 'B₆', unit: '' },
   ],
-  rows: cosineWindows.flatMap(({ name, coefficients }) => {
-    const figures = windowFigures(coefficients)
-    if (!figures) return []
-    const { coherentGain, noiseBandwidth, scallopLoss, width3dB, width6dB } = figures
-    return [[name, coherentGain, noiseBandwidth, scallopLoss, width3dB, width6dB]]
-  }),
+  rows: offers.map(({ window, figures }) => [
+    window.name,
+    figures.coherentGain,
+    figures.noiseBandwidth,
+    figures.scallopLoss,
+    figures.width3dB,
+    figures.width6dB,
+  ]),
 })
 
 /** Levels below this are drawn at it, in dB. */
