@@ -1,7 +1,7 @@
-import type { Figure } from '../figure/figure'
+import type { Figure, Series } from '../figure/figure'
 import { quantityText } from '../units/format-quantity'
 import { limitTitle } from './limit-tables'
-import type { LimitTable } from './limit-table'
+import type { LimitSegment, LimitTable } from './limit-table'
 import type { PointMargin } from './scan-margin'
 
 /** The scan as points joined by rising frequency, and the limit as one line a segment, named on the line. */
@@ -19,13 +19,7 @@ export function scanMarginFigure(
     x: { label: 'Frequency', unit: 'Hz', scale: 'log' },
     y: { label: 'Level', unit: table.unit, scale: 'linear' },
     series: [
-      ...table.segments.map(({ from, to, startLevel, endLevel }, index) => ({
-        id: `limit-${index}`,
-        label: index === 0 ? title : '',
-        role: 'limit' as const,
-        x: [from, to],
-        y: [startLevel, endLevel],
-      })),
+      ...limitLines(table.segments).map((line, index) => limitSeries(line, title, index)),
       {
         id: 'scan',
         label: 'Scan',
@@ -44,3 +38,22 @@ export function scanMarginFigure(
     ],
   }
 }
+
+/** Segments that join, as one line with a step at each transition. */
+function limitLines(segments: readonly LimitSegment[]): readonly (readonly LimitSegment[])[] {
+  const lines: LimitSegment[][] = []
+  for (const segment of segments) {
+    const last = lines.at(-1)
+    if (last?.at(-1)?.to === segment.from) last.push(segment)
+    else lines.push([segment])
+  }
+  return lines
+}
+
+const limitSeries = (line: readonly LimitSegment[], title: string, index: number): Series => ({
+  id: `limit-${index}`,
+  label: index === 0 ? title : `${title}, from ${quantityText(line[0]?.from ?? 0, 'Hz', 3)}`,
+  role: 'limit',
+  x: line.flatMap(({ from, to }) => [from, to]),
+  y: line.flatMap(({ startLevel, endLevel }) => [startLevel, endLevel]),
+})
