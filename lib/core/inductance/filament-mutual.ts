@@ -17,7 +17,7 @@ const nearlyParallelBelow = 0.01
 /**
  * Mutual inductance of two straight filaments anywhere in space, henries: M = (µ₀/4π) ∬ cos ε ds dt / R. Positive where
  * the currents run the same way, negative where they run against each other, 0 at a right angle. Filaments may touch
- * and cross; refused where they overlap on one line, as the integral diverges. To about 1e-11.
+ * and cross; refused where they overlap on one line, as the integral diverges. To about 1e-10.
  */
 export function filamentMutual(a: Segment, b: Segment): Result<number, InductanceRefusal> {
   if (![...a.start, ...a.end, ...b.start, ...b.end].every(Number.isFinite))

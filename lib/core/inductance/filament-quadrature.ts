@@ -1,6 +1,6 @@
 import { filamentPotential } from './filament-potential'
 import { cross, difference, dot, norm, scaled, sum, type Point3 } from './point'
-import { tanhSinh } from './tanh-sinh'
+import { potentialAlong } from './potential-along'
 
 /** A straight filament as its start, its direction of length 1, and its length. Metres. */
 export type Filament = { readonly start: Point3; readonly direction: Point3; readonly length: number }
@@ -17,15 +17,9 @@ export function filamentQuadrature(first: Filament, second: Filament): number {
     const along = dot(fromSecond, second.direction) + at * cosine
     const seen = sum(fromSecond, scaled(first.direction, at))
     const aside = norm(difference(seen, scaled(second.direction, along)))
-    const potential = filamentPotential(along, second.length - along, aside)
-    // Where filaments touch, a node may round onto the second one: the last nodes have no weight to speak of.
-    return Number.isFinite(potential) ? potential : 0
+    return filamentPotential(along, second.length - along, aside)
   }
-  const ends = breaksOf(first, second, cosine)
-  const integral = ends
-    .slice(1)
-    .reduce((total, end, index) => total + tanhSinh(ends[index] ?? end, end, potentialAt), 0)
-  return cosine * integral
+  return cosine * potentialAlong(first.length, breaksOf(first, second, cosine), potentialAt)
 }
 
 function breaksOf(first: Filament, second: Filament, cosine: number): readonly number[] {
@@ -34,6 +28,5 @@ function breaksOf(first: Filament, second: Filament, cosine: number): readonly n
   const endBeside = startBeside + second.length * cosine
   const sine = norm(cross(first.direction, second.direction))
   const foot = (startBeside - cosine * dot(toSecond, second.direction)) / sine ** 2
-  const inside = [startBeside, endBeside, foot].filter((at) => at > 0 && at < first.length)
-  return [0, ...inside.sort((a, b) => a - b), first.length]
+  return [startBeside, endBeside, foot]
 }

@@ -1,6 +1,6 @@
 import { vacuumPermeability } from '../physics/constants'
 import { filamentPotential } from './filament-potential'
-import { tanhSinh } from './tanh-sinh'
+import { potentialAlong } from './potential-along'
 
 /** Two parallel straight filaments that carry current the same way. Metres. */
 export type ParallelFilaments = {
@@ -47,9 +47,11 @@ export function parallelFilaments(pair: ParallelFilaments): number {
   return perFourPi * (Math.abs(sum) > 1e-3 * scale ? sum : alongTheShorter(pair))
 }
 
-/** Two filaments on one line that share more than an end. */
-export const areOverlapping = ({ length1, length2, distance, offset }: ParallelFilaments): boolean =>
-  distance === 0 && Math.min(length1, offset + length2) > Math.max(0, offset)
+/** Two filaments on one line that share more than an end, by more than what coordinates are rounded to. */
+export function areOverlapping({ length1, length2, distance, offset }: ParallelFilaments): boolean {
+  const shared = Math.min(length1, offset + length2) - Math.max(0, offset)
+  return distance === 0 && shared > 1e-12 * (length1 + length2 + Math.abs(offset))
+}
 
 function corner(x: number, distance: number): number {
   if (distance > 0) return x * Math.asinh(x / distance) - Math.hypot(x, distance)
@@ -60,10 +62,7 @@ function alongTheShorter({ length1, length2, distance, offset }: ParallelFilamen
   if (length2 > length1) {
     return alongTheShorter({ length1: length2, length2: length1, distance, offset: -offset })
   }
-  const breaks = [0, -offset, length1 - offset, length2].filter((at) => at >= 0 && at <= length2)
-  const ends = [...new Set(breaks)].sort((a, b) => a - b)
-  return ends.slice(1).reduce((sum, end, index) => {
-    const start = ends[index] ?? end
-    return sum + tanhSinh(start, end, (at) => filamentPotential(offset + at, length1 - offset - at, distance))
-  }, 0)
+  return potentialAlong(length2, [-offset, length1 - offset], (at) =>
+    filamentPotential(offset + at, length1 - offset - at, distance),
+  )
 }

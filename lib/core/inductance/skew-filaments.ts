@@ -39,10 +39,10 @@ export function skewClosedForm(pair: SkewPair): number {
   return cosine * (ends - (angle * apart) / sine)
 }
 
-/** x V(x): an end at x on one line, in the potential of the filament from `start` to `end` on the other. */
+/** x V(x): an end at x on one line, in the potential of the filament from `start` to `end` on the other; 0 on it. */
 function endTerm(x: number, start: number, end: number, { cosine, sine, apart }: SkewPair): number {
-  if (x === 0) return 0
-  return x * filamentPotential(x * cosine - start, end - x * cosine, Math.hypot(apart, x * sine))
+  const potential = filamentPotential(x * cosine - start, end - x * cosine, Math.hypot(apart, x * sine))
+  return Number.isFinite(potential) ? x * potential : 0
 }
 
 function corner(p: number, q: number, { cosine, sine, apart }: SkewPair): number {

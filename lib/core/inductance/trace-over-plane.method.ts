@@ -63,7 +63,7 @@ export const traceOverPlaneInductance = defineMethod({
           passed: true,
           sentence:
             ratio <= 100
-              ? 'w/h is at most 100, where the formula is within 0.006 % of the exact solution.'
+              ? 'w/h is at most 100, where the formula is within 0.008 % of the exact solution.'
               : 'w/h is above 100, where the formula is within 0.03 % of the exact solution.',
         },
         ...(thickness === undefined ? [] : [thicknessCheck(thickness, width, height)]),
