@@ -36,6 +36,12 @@ export function neighboursOf(
   return { below, above }
 }
 
+/** The nearest preferred value by difference, |x − v|: another one than by ratio in a narrow zone, as at 1.049. */
+export function nearestByDifference(value: number, series: SeriesName): number {
+  const { below, above } = neighboursOf(value, series)
+  return value - below <= above - value ? below : above
+}
+
 /** The nearest preferred value by ratio, |ln(x/v)|: the rule for parts, because tolerances are relative. */
 export function nearestByRatio(value: number, series: SeriesName): number {
   const { below, above } = neighboursOf(value, series)

@@ -72,7 +72,26 @@ function bestOf(objective: (logRho: number) => number, k: number): number {
   return minimiseOn(objective, best - step, best + step, 1e-9)
 }
 
-function middleOfRealInterval(isReal: (logRho: number) => boolean, inside: number): number {
+/** The least and the most Rs with which every pole is real, in ohms; null where one rings with any Rs. */
+export function allRealInterval(
+  node: BareNode,
+  capacitance: number,
+): { readonly low: number; readonly high: number } | null {
+  const z0 = characteristicImpedance(node)
+  const k = capacitance / node.capacitance
+  const dampingAt = (logRho: number) => leastDamping(withSnubber(node, Math.exp(logRho) * z0, capacitance))
+  const best = bestOf((logRho) => -dampingAt(logRho), k)
+  if (dampingAt(best) < 1 - 1e-9) return null
+  const [low, high] = realInterval((logRho) => dampingAt(logRho) >= 1 - 1e-9, best)
+  return { low: Math.exp(low) * z0, high: Math.exp(high) * z0 }
+}
+
+const middleOfRealInterval = (isReal: (logRho: number) => boolean, inside: number): number => {
+  const [low, high] = realInterval(isReal, inside)
+  return (low + high) / 2
+}
+
+function realInterval(isReal: (logRho: number) => boolean, inside: number): readonly [number, number] {
   const edgeTowards = (direction: 1 | -1) => {
     let near = inside
     let far = inside + direction
@@ -83,5 +102,5 @@ function middleOfRealInterval(isReal: (logRho: number) => boolean, inside: numbe
     }
     return near
   }
-  return (edgeTowards(-1) + edgeTowards(1)) / 2
+  return [edgeTowards(-1), edgeTowards(1)]
 }

@@ -1,7 +1,8 @@
 import { z } from 'zod'
 
 import { analyseCapture } from '@/lib/core/capture/analyse-capture'
-import type { CaptureAnalysis, TwoStates } from '@/lib/core/capture/capture-analysis'
+import type { CaptureAnalysis, Tones, TwoStates } from '@/lib/core/capture/capture-analysis'
+import { tonesOf } from '@/lib/core/capture/tones-of'
 import { err, ok, type Result } from '@/lib/core/result'
 import type { Capture } from '@/lib/core/waveform/capture'
 import { parseCapture } from '@/lib/core/waveform/parse-capture'
@@ -24,13 +25,19 @@ function outputsOf({ channels, startSeconds, intervalSeconds }: Capture): Result
   for (const { name, values } of channels) {
     const analysed = analyseCapture(values, startSeconds, intervalSeconds)
     if (!analysed.ok) return err(`${name}: ${analysed.error.message}`)
-    outputs[name] = channelOutputs(analysed.value)
+    const { states, tones } = analysed.value
+    // The lines of a train are given too: a wave of few sines may look like edges.
+    const lines = states?.kind === 'train' ? tonesOf(values, intervalSeconds) : tones
+    outputs[name] = channelOutputs(analysed.value, lines)
   }
   const [only] = channels
   return ok(channels.length === 1 && only !== undefined ? (outputs[only.name] ?? {}) : outputs)
 }
 
-const channelOutputs = ({ states, tones, minimum, maximum, warnings }: CaptureAnalysis): Outputs => ({
+const channelOutputs = (
+  { states, minimum, maximum, warnings }: CaptureAnalysis,
+  tones: Tones | null,
+): Outputs => ({
   ...(states === null ? noStates : stateOutputs(states)),
   tones:
     tones?.list.map(({ frequency, amplitude, level }) => ({
