@@ -1,8 +1,8 @@
-import { lastClipped } from '../ring/clipped-runs'
 import type { EdgeSpan } from '../ring/find-edge'
 import { measureRinging } from '../ring/measure-ringing'
 import type { Ring, Trace } from '../ring/ring-measurement'
 import { ringAt } from '../ring/ring-figure'
+import { clippedSwingsEnd } from './clipped-swings'
 
 /** What stands above noise and rounding; all in the unit of the record. */
 export type Floors = {
@@ -29,49 +29,71 @@ export type AfterEdge = {
   readonly reconstructedPeak: number | null
 }
 
+/** With fewer samples a cycle than this, the fitted ring tells its crest better than the samples near it. */
+const coarse = 20
+
 /** Peak and ring after an edge, up to where the next edge begins. */
 export function afterEdge(trace: Trace, edge: KnownEdge, floors: Floors): AfterEdge {
   const { values } = trace
   const isLast = edge.stateEnd === values.length
   const end = isLast ? edge.stateEnd : edge.stateEnd - Math.ceil(1.5 * edge.transition)
   const to = Math.max(edge.crossing + 2, end)
-  const clipped = clippedEnd(values, edge, to, floors)
-  const from = clipped === null ? firstBeyond(values, edge, to) : nextCrossing(values, clipped, edge.after)
+  const beyond = firstBeyond(values, edge, to)
+  const clipped = clippedSwingsEnd(values, {
+    from: beyond,
+    to,
+    level: edge.after,
+    floor: floors.deviation,
+    step: floors.converterStep,
+  })
+  const from = clipped ?? beyond
   const search = { from, to, level: edge.after, floor: floors.deviation }
   const { ring, absence } = measureRinging(trace, search)
   const peakAt = extremeIndex(values, edge, to)
-  const peak = interpolatedPeak(values, peakAt)
+  const measured = interpolatedPeak(values, peakAt)
+  const crest = ring === null || clipped !== null ? null : coarseCrest(trace, ring, edge)
+  const peak = crest ?? measured
+  const isHidden = crest !== null && ring !== null && isFlattened(trace, ring, edge, peakAt, crest, floors)
   return {
     peak: Math.abs(peak - edge.after) > floors.deviation && isBeyond(edge, peak) ? peak : edge.after,
-    isClipped: clipped !== null,
+    isClipped: clipped !== null || isHidden,
     ring,
     absence,
-    reconstructedPeak: clipped === null || ring === null ? null : firstPeakOf(trace, ring, edge, peakAt),
+    reconstructedPeak: clipped === null || ring === null ? crest : firstPeakOf(trace, ring, edge, peakAt),
   }
 }
+
+/** The first crest of a ring with few samples a cycle: the highest sample may be that of a later, lower crest. */
+function coarseCrest(trace: Trace, ring: Ring, edge: KnownEdge): number | null {
+  if (coarse * trace.intervalSeconds * ring.dampedFrequency <= 1) return null
+  // A fit begins at the first swing.
+  return firstPeakOf(trace, ring, edge, indexOf(trace, ring.fit.startSeconds))
+}
+
+/** Whether two samples share an extreme further below the crest of the fit than a crest between samples can hide. */
+function isFlattened(
+  { values, intervalSeconds }: Trace,
+  ring: Ring,
+  edge: KnownEdge,
+  peakAt: number,
+  crest: number,
+  floors: Floors,
+): boolean {
+  const extreme = values[peakAt] ?? crest
+  const hidden = 1 - Math.cos(Math.PI * ring.dampedFrequency * intervalSeconds)
+  const isShared = values[peakAt - 1] === extreme || values[peakAt + 1] === extreme
+  return isShared && Math.abs(crest - extreme) > hidden * Math.abs(crest - edge.after) + floors.deviation
+}
+
+const indexOf = ({ startSeconds, intervalSeconds }: Trace, instant: number): number =>
+  Math.round((instant - startSeconds) / intervalSeconds)
 
 const isBeyond = ({ before, after }: KnownEdge, value: number): boolean =>
   (value - after) * (after - before) > 0
 
-/** The end of the last cut-off peak; a flat level at rest is none. */
-function clippedEnd(values: Float64Array, edge: KnownEdge, to: number, floors: Floors): number | null {
-  const found = lastClipped(values, edge.crossing, to, floors.converterStep)
-  const value = found === null ? edge.after : (values[found] ?? edge.after)
-  const away = Math.min(Math.abs(value - edge.after), Math.abs(value - edge.before))
-  return away > floors.deviation ? found : null
-}
-
 function firstBeyond(values: Float64Array, edge: KnownEdge, to: number): number {
   let index = edge.crossing
   while (index < to && !isBeyond(edge, values[index] ?? edge.after)) index += 1
-  return index
-}
-
-/** Where the trace next passes a level after a cut-off peak. */
-function nextCrossing(values: Float64Array, after: number, level: number): number {
-  const side = Math.sign((values[after] ?? 0) - level)
-  let index = after + 1
-  while (index < values.length && Math.sign((values[index] ?? 0) - level) === side) index += 1
   return index
 }
 

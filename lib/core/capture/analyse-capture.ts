@@ -30,7 +30,7 @@ export function analyseCapture(
   const noise = sampleNoise(values, summary.converterStep)
   const levels = twoLevels(values, summary, noise)
   const trace = { values, startSeconds, intervalSeconds }
-  const states = levels === null ? null : twoStates(trace, levels, noise, summary.converterStep)
+  const states = levels === null ? null : twoStates(trace, levels, noise, summary)
   return ok({
     ...summary,
     states,

@@ -5,8 +5,11 @@ import { stretchesOf, type Stretch } from '../ring/state-stretches'
 /** Samples within this part of the step around a level are at rest there. */
 const atRest = 0.1
 
-/** A stretch of which this part is at rest is a state; of a ring wide enough to cross the middle, only 13 % is. */
-const restPart = 0.3
+/**
+ * A stretch of which this part is at rest is a state. Of the trough of a ring that swings back through the middle, and as
+ * far as the level before the edge, no more than arccos(0.9)/arccos(0.5) = 0.43 is.
+ */
+const restPart = 0.45
 
 /** Fewer samples at rest than this are chance. */
 const restSamples = 3

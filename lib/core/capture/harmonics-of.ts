@@ -73,11 +73,23 @@ function linesOf(values: Float64Array, period: number): Lines | null {
       spacing: length / period,
     }
   }
-  const whole = Math.floor(periods + 0.5 / period)
-  const length = Math.min(values.length, Math.round(whole * period))
-  if (whole < 1) return null
+  const length = wholePeriods(values.length, period)
+  if (length === 0) return null
   const transform = transformReal(values.subarray(0, length))
   return { transform, scale: scaleOf(length, 1), window: rectangular, spacing: length / period }
+}
+
+/** Of the numbers of periods that fill at least half a record, the samples of the one nearest to whole samples. */
+function wholePeriods(samples: number, period: number): number {
+  const most = Math.floor((samples + 0.5) / period)
+  let best = 0
+  let leastOff = Infinity
+  for (let count = most; count >= 1 && 2 * count >= most; count -= 1) {
+    const length = Math.min(samples, Math.round(count * period))
+    const off = Math.abs(length - count * period)
+    if (off < leastOff - 0.05) [best, leastOff] = [length, off]
+  }
+  return best
 }
 
 const scaleOf = (length: number, gain: number): number => 2 / (length * gain)

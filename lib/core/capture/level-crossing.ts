@@ -9,16 +9,24 @@ export type EdgeView = {
   /** Samples that belong to the edge and to the states beside it: [start, end). */
   readonly start: number
   readonly end: number
+  /** Standard deviation of the noise, in the unit of the values. */
+  readonly noise: number
 }
 
-/** A curve through so many samples on either side of a crossing, as a part of the transition from 10 to 90 %. */
-const fitPart = 0.08
+/** Curves through so many samples on either side of a crossing are tried, as parts of the transition from 10 to 90 %. */
+const fitParts = [0.08, 0.16, 0.25] as const
+
+/** A wider curve is tried while the noise moves a crossing by more than this part of the transition. */
+const mostShift = 0.015
+
+/** A curve is laid again about the crossing that it gives, so often. */
+const passes = 4
 
 /**
  * The instants, in samples, at which an edge passes 10, 50 and 90 % of the way (reference levels of IEEE Std 181-2011): the
  * first crossings on either side of the middle. Sub-sample: a cubic through the four samples around a crossing where an
- * edge has few of them; else a parabola by least squares through those within 8 % of the transition on either side, which
- * averages the noise.
+ * edge has few of them; else a parabola by least squares through those within 8 % of the transition on either side, and up
+ * to 25 % where the noise asks for it.
  */
 export function edgeInstants(edge: EdgeView): {
   readonly at10: number
@@ -27,11 +35,11 @@ export function edgeInstants(edge: EdgeView): {
 } {
   const rough10 = lastBelow(edge, 0.1)
   const rough90 = firstAbove(edge, 0.9)
-  const half = Math.floor(fitPart * (rough90 - rough10))
+  const width = rough90 - rough10
   return {
-    at10: refine(edge, rough10, 0.1, half),
-    at50: refine(edge, lastBelow(edge, 0.5), 0.5, half),
-    at90: refine(edge, rough90 - 1, 0.9, half),
+    at10: refine(edge, rough10, 0.1, width),
+    at50: refine(edge, lastBelow(edge, 0.5), 0.5, width),
+    at90: refine(edge, rough90 - 1, 0.9, width),
   }
 }
 
@@ -52,12 +60,18 @@ function firstAbove(edge: EdgeView, level: number): number {
 }
 
 /** The crossing between the samples `below` and the next one. */
-function refine(edge: EdgeView, below: number, level: number, half: number): number {
-  if (half >= 2) {
-    const fitted = parabolaCrossing(edge, below, level, half)
-    if (fitted !== null) return fitted
+function refine(edge: EdgeView, below: number, level: number, width: number): number {
+  const noise = edge.noise / Math.abs(edge.after - edge.before)
+  let best = cubicCrossing(edge, below, level)
+  for (const part of fitParts) {
+    const half = Math.floor(part * width)
+    if (half < 2) continue
+    const fitted = settledCrossing(edge, below + 0.5, level, half)
+    if (fitted === null) continue
+    best = fitted.at
+    if (noise / fitted.slope / Math.sqrt(2 * half) <= mostShift * width) break
   }
-  return cubicCrossing(edge, below, level)
+  return best
 }
 
 /** Lagrange's cubic through four neighbours, halved down to the crossing between the middle two. */
@@ -67,12 +81,13 @@ function cubicCrossing(edge: EdgeView, below: number, level: number): number {
   if (first === second) return below + 1
   const linear = below - first / (second - first)
   if (below - 1 < edge.start || below + 2 >= edge.end || first > 0 || second < 0) return linear
-  const outer = [progressAt(edge, below - 1) - level, progressAt(edge, below + 2) - level] as const
+  const before = progressAt(edge, below - 1) - level
+  const beyond = progressAt(edge, below + 2) - level
   const at = (x: number): number =>
-    (-outer[0] * x * (x - 1) * (x - 2)) / 6 +
+    (-before * x * (x - 1) * (x - 2)) / 6 +
     (first * (x + 1) * (x - 1) * (x - 2)) / 2 -
     (second * (x + 1) * x * (x - 2)) / 2 +
-    (outer[1] * (x + 1) * x * (x - 1)) / 6
+    (beyond * (x + 1) * x * (x - 1)) / 6
   let low = 0
   let high = 1
   for (let halving = 0; halving < 40; halving += 1) {
@@ -83,10 +98,24 @@ function cubicCrossing(edge: EdgeView, below: number, level: number): number {
   return below + (low + high) / 2
 }
 
-/** By least squares over x = −half … half about the middle of the two samples; null where it does not cross there. */
-function parabolaCrossing(edge: EdgeView, below: number, level: number, half: number): number | null {
-  const from = below - half + 1
-  const to = below + half
+type Crossing = { readonly at: number; readonly slope: number }
+
+/** The crossing of a curve that is laid about itself; null where the edge has no room for it or it does not cross. */
+function settledCrossing(edge: EdgeView, rough: number, level: number, half: number): Crossing | null {
+  let found: Crossing = { at: rough, slope: Infinity }
+  for (let pass = 0; pass < passes; pass += 1) {
+    const from = Math.round(found.at + 0.5) - half
+    const next = parabolaCrossing(edge, from, from + 2 * half - 1, level)
+    if (next === null) return pass === 0 ? null : found
+    const isSettled = Math.abs(next.at - found.at) < 0.5
+    found = next
+    if (isSettled) break
+  }
+  return found
+}
+
+/** By least squares over the samples from … to; null where it does not cross among them. */
+function parabolaCrossing(edge: EdgeView, from: number, to: number, level: number): Crossing | null {
   if (from < edge.start || to >= edge.end) return null
   const middle = (from + to) / 2
   let s2 = 0
@@ -105,10 +134,9 @@ function parabolaCrossing(edge: EdgeView, below: number, level: number, half: nu
   }
   const count = to - from + 1
   const bend = (count * y2 - s2 * y0) / (count * s4 - s2 * s2)
-  const constant = (y0 - bend * s2) / count
   const slope = y1 / s2
-  const root = nearRoot(bend, slope, constant)
-  return root !== null && Math.abs(root) <= half ? middle + root : null
+  const root = nearRoot(bend, slope, (y0 - bend * s2) / count)
+  return root !== null && Math.abs(root) <= count ? { at: middle + root, slope } : null
 }
 
 /** The root of bend x² + slope x + constant nearer to 0. */

@@ -19,12 +19,13 @@ export function poolRings(
   followed: readonly AfterEdge[],
   allEdges: number,
   intervalSeconds: number,
+  noise: number,
 ): Pooling {
   const rings = followed.flatMap(({ ring }) => (ring === null ? [] : [ring]))
   if (rings.length === 0 || 2 * rings.length < followed.length) {
     return { ring: null, absence: commonAbsence(followed) }
   }
-  const deviations = rings.map((ring) => ringDeviations(ring, intervalSeconds))
+  const deviations = rings.map((ring) => ringDeviations(ring, intervalSeconds, noise))
   const fromFits = (pick: 'frequency' | 'dampingRatio') =>
     medianOf(deviations.map((deviation) => deviation?.[pick] ?? 0))
   const frequency = intervalOf(

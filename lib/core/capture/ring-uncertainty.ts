@@ -11,6 +11,9 @@ export type RingDeviations = {
   readonly dampingRatio: number
 }
 
+/** What a fit leaves over, beyond so many times the noise, is no noise but changes with half a cycle. */
+const likeNoise = 1.3
+
 /**
  * Standard deviations of the frequency and damping of one fitted ring: the diagonal of s² (JᵀJ)⁻¹, J the derivatives of
  * level + e^(−αt)(a cos ωt + b sin ωt) by its five parameters and s the rms of what the fit leaves over. Theory of
@@ -19,6 +22,7 @@ export type RingDeviations = {
 export function ringDeviations(
   { fit, dampedFrequency }: Ring,
   intervalSeconds: number,
+  noise: number,
 ): RingDeviations | null {
   const count = Math.round((fit.endSeconds - fit.startSeconds) / intervalSeconds) + 1
   const stride = Math.max(1, Math.floor(count / mostPoints))
@@ -42,7 +46,9 @@ export function ringDeviations(
     const unit = [0, 0, 0, 0, 0].map((_, index) => (index === row ? 1 : 0))
     return (solveLinear(matrix, unit)?.[row] ?? NaN) / stride
   }
-  const scale = fit.residualRms / intervalSeconds
+  const perCycle = 1 / (dampedFrequency * intervalSeconds)
+  const dependence = fit.residualRms > likeNoise * noise ? Math.sqrt(Math.max(1, perCycle / 2)) : 1
+  const scale = (dependence * fit.residualRms) / intervalSeconds
   const ofDecay = scale * Math.sqrt(varianceOf(3))
   const ofOmega = scale * Math.sqrt(varianceOf(4))
   if (!Number.isFinite(ofDecay + ofOmega)) return null

@@ -16,10 +16,15 @@ export type TimedEdge = EdgeSpan & {
 }
 
 /** Levels, instants and transition of an edge. */
-export function timeEdge(values: Float64Array, span: EdgeSpan, { base, top }: StateLevels): TimedEdge {
+export function timeEdge(
+  values: Float64Array,
+  span: EdgeSpan,
+  { base, top }: StateLevels,
+  noise: number,
+): TimedEdge {
   const [before, after] = span.direction === 'rising' ? [base, top] : [top, base]
   const { stateStart: start, stateEnd: end, crossing } = span
-  const { at10, at50, at90 } = edgeInstants({ values, before, after, crossing, start, end })
+  const { at10, at50, at90 } = edgeInstants({ values, before, after, crossing, start, end, noise })
   return { ...span, before, after, middle: at50, transition: at90 - at10 }
 }
 

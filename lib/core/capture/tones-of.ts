@@ -37,3 +37,31 @@ function noiseOf({ amplitudes }: AmplitudeSpectrum): number {
   for (let bin = 1; bin < amplitudes.length; bin += stride) sizes.push(amplitudes[bin] ?? 0)
   return sizes.length === 0 ? 0 : medianOf(sizes) / Math.sqrt(Math.LN2)
 }
+
+/** Sines of fewer periods than this in the record cannot be told from an edge. */
+const fewestPeriods = 6
+
+/** Sines with this part of the power of a record about its mean make it up. */
+const mostOfPower = 0.9
+
+/** More sines than this are no few. */
+const fewSines = 40
+
+/** So many samples from the middle of a record tell. */
+const samplesTold = 2 ** 17
+
+/** Whether a few steady sines of many periods make up a record, as they cannot make up single edges. */
+export function isSumOfSines(values: Float64Array, intervalSeconds: number): boolean {
+  const count = Math.min(values.length, samplesTold)
+  const first = (values.length - count) >> 1
+  const tones = tonesOf(values.subarray(first, first + count), intervalSeconds)
+  if (tones === null || tones.list.length > fewSines) return false
+  const least = fewestPeriods / (count * intervalSeconds)
+  const power = tones.list.reduce(
+    (sum, { frequency, amplitude }) => (frequency < least ? sum : sum + amplitude ** 2 / 2),
+    0,
+  )
+  const mean = values.reduce((sum, value) => sum + value, 0) / values.length
+  const all = values.reduce((sum, value) => sum + (value - mean) ** 2, 0) / values.length
+  return power >= mostOfPower * all
+}

@@ -1,14 +1,16 @@
 import type { StateLevels, Trace } from '../ring/ring-measurement'
 import { afterEdge, type Floors } from './after-edge'
-import type { Period, PooledRing, TwoStates } from './capture-analysis'
+import type { Harmonics, Period, PooledRing, TwoStates } from './capture-analysis'
 import { findEdges } from './find-edges'
 import { findPeriod, type FoundPeriod } from './find-period'
 import { harmonicsOf } from './harmonics-of'
 import { poolOvershoot, type FollowedEdge } from './pool-overshoot'
 import { poolRings } from './pool-rings'
-import { restsBetween } from './rests-between'
+import { restRatio } from './rest-ratio'
 import { spreadChoice } from './spread-choice'
+import { isSumOfSines } from './tones-of'
 import { pooledTransition, timeEdge, type TimedEdge } from './timed-edges'
+import type { ValueSummary } from './value-range'
 
 /** So many edges are timed, and so many followed by a fit of their ring; of more, a spread choice. */
 const mostTimed = 8192
@@ -19,11 +21,18 @@ const deviations = 5
 const steps = 1.5
 const leastPart = 0.01
 
+/** A record that rests at its levels for as long as its edges take has states; for so many times as long, beyond doubt. */
+const leastRest = 1
+const surelyRests = 40
+
+/** The harmonics of a train make up this part of its power about the mean. */
+const mostOfPower = 0.8
+
 /** A ring that falls by less than this per radian does not decay: it is a tone on a wave of few sines. */
 const leastDamping = 0.002
 
 /** A ring still larger than this part of the step at the end has not shown the level that it settles to. */
-const diedAway = 0.02
+const diedAway = 0.005
 
 /**
  * What a record of edges between two levels shows; null where it does not rest at them, as a sum of sines does not, nor
@@ -33,12 +42,12 @@ export function twoStates(
   trace: Trace,
   levels: StateLevels,
   noise: number,
-  converterStep: number,
+  { converterStep, deviation }: ValueSummary,
 ): TwoStates | null {
   const spans = findEdges(trace.values, levels)
   const stride = Math.ceil(spans.length / mostTimed)
   const chosen = spans.filter((_, index) => (index >> 1) % stride === 0)
-  const edges = chosen.map((span) => timeEdge(trace.values, span, levels))
+  const edges = chosen.map((span) => timeEdge(trace.values, span, levels, noise))
   if (edges.length === 0) return null
   const floors: Floors = {
     deviation: Math.max(deviations * noise, steps * converterStep, leastPart * (levels.top - levels.base)),
@@ -52,17 +61,33 @@ export function twoStates(
     followed.map(({ after }) => after),
     spans.length,
     trace.intervalSeconds,
+    noise,
   )
   const tried = followed.map(({ edge }) => edge)
-  if (!restsBetween(trace.values, tried, noise) && !decays(pooled.ring)) return null
-  return describeStates(trace, edges, settle(trace, followed, spans.length), pooled, noise, stride)
+  const ratio = restRatio(trace.values, tried, noise)
+  if (!(ratio >= leastRest || decays(pooled.ring))) return null
+  const settled = settle(trace, followed, spans.length, noise)
+  const states = describeStates(trace, edges, settled, pooled, noise, stride)
+  const isDoubtful =
+    ratio < surelyRests &&
+    (states?.harmonics ? powerOf(states.harmonics) < mostOfPower * deviation ** 2 : true)
+  return isDoubtful && isSumOfSines(trace.values, trace.intervalSeconds) ? null : states
 }
+
+/** Mean square of the sines of a train. */
+const powerOf = ({ list }: Harmonics): number =>
+  list.reduce((sum, { amplitude }) => sum + amplitude ** 2 / 2, 0)
 
 const decays = (ring: PooledRing | null): boolean =>
   ring !== null && ring.confidence !== 'low' && ring.dampingRatio.value > leastDamping
 
 /** The level after the only edge is that of the fitted ring where the ring has not died away. */
-function settle(trace: Trace, followed: readonly FollowedEdge[], all: number): readonly FollowedEdge[] {
+function settle(
+  trace: Trace,
+  followed: readonly FollowedEdge[],
+  all: number,
+  noise: number,
+): readonly FollowedEdge[] {
   const [only] = followed
   const ring = only?.after.ring ?? null
   if (all !== 1 || only === undefined || ring === null) return followed
@@ -72,7 +97,7 @@ function settle(trace: Trace, followed: readonly FollowedEdge[], all: number): r
   if (left <= diedAway * Math.abs(edge.after - edge.before)) return followed
   const [base, top] =
     edge.direction === 'rising' ? [edge.before, ring.fit.level] : [ring.fit.level, edge.before]
-  return [{ after, edge: timeEdge(trace.values, edge, { base, top }) }]
+  return [{ after, edge: timeEdge(trace.values, edge, { base, top }, noise) }]
 }
 
 function describeStates(
