@@ -32,7 +32,7 @@ export function barSelf({ width, thickness, length }: Bar): number {
 function wedgeAlong(length: number, reach: number, slope: number): number {
   const [p, logarithm] = [length / reach, 1 / 4 - (1 + slope) / 9 + slope / 16]
   const rest = (u: number): number => {
-    const distance = Math.hypot(p, u)
+    const distance = Math.sqrt(p * p + u * u)
     return u * (1 - u) * (1 - slope * u) * (Math.log(p + distance) - p / (distance + u))
   }
   return length * (logarithm + (p > 1.5 ? gaussOnUnit(rest) : tanhSinh(0, 1, rest)))

@@ -17,8 +17,7 @@ export type TakenLoop = {
 }
 
 /** Checks what was drawn: the outline is simple, the conductor has its sizes, fits the loop and clears the plane. */
-export function takenLoop(values: DrawnLoop): Result<TakenLoop, MethodError> {
-  const polygon = outlineOf(values)
+export function takenLoop(values: DrawnLoop, polygon = outlineOf(values)): Result<TakenLoop, MethodError> {
   if (!polygon.ok) return err(noSolution(polygon.error.message, 'corners'))
   const conductor = conductorOf(values)
   if (!conductor.ok) return conductor

@@ -25,7 +25,7 @@ export const alignedFilaments = (length: number, distance: number): number =>
   2 *
   perFourPi *
   length *
-  (Math.asinh(length / distance) - length / (Math.hypot(length, distance) + distance))
+  (Math.asinh(length / distance) - length / (Math.sqrt(length * length + distance * distance) + distance))
 
 /**
  * Mutual inductance of parallel filaments of lengths l, m at distance d whose starts are D apart, henries:

@@ -60,13 +60,16 @@ function closeBy(a: PlanarSide, b: PlanarSide, copies: readonly Copy[]): number 
 }
 
 function farApart(a: PlanarSide, b: PlanarSide, copies: readonly Copy[], rule: GaussRule): number {
+  const { nodes, weights } = rule
   let sum = 0
-  for (const [i, s] of rule.nodes.entries()) {
-    const weight = rule.weights[i] ?? 0
+  for (let i = 0; i < nodes.length; i += 1) {
+    const [s, weight] = [nodes[i] ?? 0, weights[i] ?? 0]
     const [dx, dy] = [a.x + s * a.halfX - b.x, a.y + s * a.halfY - b.y]
-    for (const [j, t] of rule.nodes.entries()) {
-      const square = (dx - t * b.halfX) ** 2 + (dy - t * b.halfY) ** 2
-      const both = weight * (rule.weights[j] ?? 0)
+    for (let j = 0; j < nodes.length; j += 1) {
+      const t = nodes[j] ?? 0
+      const [awayX, awayY] = [dx - t * b.halfX, dy - t * b.halfY]
+      const square = awayX * awayX + awayY * awayY
+      const both = weight * (weights[j] ?? 0)
       for (const { height, sign } of copies) sum += (sign * both) / Math.sqrt(square + height * height)
     }
   }

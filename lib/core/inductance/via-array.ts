@@ -41,11 +41,7 @@ export function viaArray({
     return err(refusal('overlap', `Vias ${i} and ${j} touch: their middles must be more than d apart.`))
   }
   const single = tubeSelf(length, diameter / 2)
-  const matrix = positions.map((a, i) =>
-    Float64Array.from(positions, (b, j) =>
-      i === j ? 1 : alignedFilaments(length, Math.hypot(a[0] - b[0], a[1] - b[1])) / single,
-    ),
-  )
+  const matrix = positions.map((a, i) => mutualsOf(a, positions.slice(0, i), length, single))
   const currents = solvePositive(matrix, new Float64Array(positions.length).fill(1))
   const total = currents.reduce((sum, current) => sum + current, 0)
   if (!(total > 0)) return err(refusal('out_of_range', 'The vias are too near each other for this model.'))
@@ -58,10 +54,19 @@ export function viaArray({
   })
 }
 
+/** A row of the matrix up to its diagonal, which is all that the solver reads, in parts of one via alone. */
+function mutualsOf(via: Point2, before: readonly Point2[], length: number, single: number): Float64Array {
+  const row = new Float64Array(before.length + 1).fill(1)
+  for (const [j, other] of before.entries()) row[j] = alignedFilaments(length, spacingOf(via, other)) / single
+  return row
+}
+
+const spacingOf = (a: Point2, b: Point2): number => Math.sqrt((a[0] - b[0]) ** 2 + (a[1] - b[1]) ** 2)
+
 function viasThatMeet(positions: readonly Point2[], diameter: number): readonly [number, number] | null {
   for (const [i, a] of positions.entries()) {
     for (const [j, b] of positions.slice(0, i).entries()) {
-      if (!(Math.hypot(a[0] - b[0], a[1] - b[1]) > diameter)) return [j + 1, i + 1]
+      if (!(spacingOf(a, b) > diameter)) return [j + 1, i + 1]
     }
   }
   return null

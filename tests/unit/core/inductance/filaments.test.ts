@@ -10,7 +10,7 @@ const mutual = (a: Segment, b: Segment): number => {
   return answer.ok ? answer.value : Number.NaN
 }
 
-const coordinate = fc.double({ min: -1, max: 1, noNaN: true })
+const coordinate = fc.integer({ min: -1000, max: 1000 }).map((count) => count / 1000)
 const point = fc.tuple(coordinate, coordinate, coordinate)
 const segment = fc
   .record({ start: point, end: point })
