@@ -22,7 +22,7 @@ export const partialInductance = defineMethod({
     shape: {
       kind: 'choice',
       label: 'Shape',
-      symbol: '',
+      symbol: 'type',
       help: 'Of the cross-section',
       isRequired: true,
       options: { wire: 'Round wire', bar: 'Trace or bar' },

@@ -20,7 +20,7 @@ export const polygonLoopInputs = {
   conductor: {
     kind: 'choice',
     label: 'Conductor',
-    symbol: '',
+    symbol: 'type',
     help: 'What the loop is made of, and how the current flows in it',
     isRequired: true,
     options: {
