@@ -22,11 +22,15 @@ const asked = 20_000
  */
 export function tonesOf(values: Float64Array, intervalSeconds: number): Tones | null {
   const spectrum = amplitudeSpectrum(values, intervalSeconds, blackmanHarris4)
-  if (!spectrum.ok) return null
-  const strongest = spectrum.value.amplitudes.subarray(1).reduce((most, value) => Math.max(most, value), 0)
+  return spectrum.ok ? tonesIn(spectrum.value) : null
+}
+
+/** The sines of a spectrum that stand above its noise; null where none does. */
+export function tonesIn(spectrum: AmplitudeSpectrum): Tones | null {
+  const strongest = spectrum.amplitudes.subarray(1).reduce((most, value) => Math.max(most, value), 0)
   if (!(strongest > 0)) return null
-  const floor = Math.max(aboveNoise * noiseOf(spectrum.value), weakest * strongest)
-  const list = findTones(spectrum.value, { floor, mostTones })
+  const floor = Math.max(aboveNoise * noiseOf(spectrum), weakest * strongest)
+  const list = findTones(spectrum, { floor, mostTones })
   return list.length === 0 ? null : { list, floorLevel: levelOfPeak(floor) }
 }
 
