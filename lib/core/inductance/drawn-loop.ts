@@ -32,7 +32,7 @@ export function takenLoop(values: DrawnLoop, polygon = outlineOf(values)): Resul
     : err(noSolution(image.error.message, 'height'))
 }
 
-export function conductorOf(values: DrawnLoop): Result<LoopConductor, MethodError> {
+function conductorOf(values: DrawnLoop): Result<LoopConductor, MethodError> {
   const { conductor: kind, wireRadius, traceWidth, thickness = 35e-6 } = values
   if (kind === 'trace') {
     return traceWidth === undefined

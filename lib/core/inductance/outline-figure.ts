@@ -3,7 +3,7 @@ import { quantityText } from '../units/format-quantity'
 import type { Polygon } from './polygon'
 
 /** Width to height of the usual plot on the screen, so that both axes have about the same scale there. */
-const shape = 1.9
+const shape = 2
 
 /** The outline of a loop as it was entered, its first corner marked. */
 export function outlineFigure({ corners, area, perimeter }: Polygon): Figure {

@@ -43,6 +43,3 @@ export const longSolidSelf = (length: number, radius: number): number =>
 /** Geometric mean distance of the points of a circle, and of a disc, to each other: a and a e^(−¼). */
 export const surfaceMeanDistance = (radius: number): number => radius
 export const solidMeanDistance = (radius: number): number => radius * Math.exp(-1 / 4)
-
-/** A wire by two filaments its geometric mean distance apart, henries. */
-export const selfAtMeanDistance = alignedFilaments

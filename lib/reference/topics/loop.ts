@@ -112,7 +112,7 @@ export const loopTopics: Topics = {
     },
   ),
   'loop.voltage': finiteTopic(z.object({ l: positive, di: z.number(), dt: positive }), ({ l, di, dt }) =>
-    ok({ v: (l * di) / dt }),
+    ok({ v: l * (di / dt) }),
   ),
 }
 

@@ -45,12 +45,12 @@ describe('a drawn loop', () => {
     expect(result(run, 'inductance')).toBeLessThan(result(run, 'freeSpace'))
   })
 
-  it('is drawn closed, both axes to the same scale for a plot of 1.9 to 1', () => {
+  it('is drawn closed, both axes to the same scale for a plot of 2 to 1', () => {
     const [figure] = runOf('polygon-loop-inductance').outcome.figures
     const outline = figure?.series[0]
     expect([outline?.x[0], outline?.y[0]]).toEqual([outline?.x.at(-1), outline?.y.at(-1)])
     const [x, y] = [figure?.x.range ?? [0, 0], figure?.y.range ?? [0, 1]]
-    expect((x[1] - x[0]) / (y[1] - y[0])).toBeCloseTo(1.9, 10)
+    expect((x[1] - x[0]) / (y[1] - y[0])).toBeCloseTo(2, 10)
   })
 
   it('has an interval from the tolerance of the height that lies about its value', () => {
