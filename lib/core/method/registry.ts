@@ -2,6 +2,7 @@ import { cableEmission } from '../emission/cable.method'
 import { smallLoopEmission } from '../emission/small-loop.method'
 import { filterCorner } from '../filter/filter-corner.method'
 import { filterDamping } from '../filter/filter-damping.method'
+import { groundingReview } from '../grounding/grounding-review.method'
 import { circularLoopInductance } from '../inductance/circular-loop.method'
 import { coplanarPairInductance } from '../inductance/coplanar-pair.method'
 import { loopVoltage } from '../inductance/loop-voltage.method'
@@ -16,13 +17,19 @@ import { viaReturnInductance } from '../inductance/via-return.method'
 import { wirePairInductance } from '../inductance/wire-pair.method'
 import { distanceConversion } from '../limits/distance-conversion.method'
 import { scanMargin } from '../limits/scan-margin.method'
+import { magneticDipoleField } from '../near-field/magnetic-dipole.method'
+import { polygonNearField } from '../near-field/polygon-field.method'
+import { preferredValue } from '../parts/preferred-value.method'
 import { receiverPulseResponse } from '../receiver/pulse-response.method'
 import { spreadSpectrumEffect } from '../receiver/spread-spectrum.method'
 import type { Result } from '../result'
 import { planeShield } from '../shielding/plane-shield.method'
 import { stitchingDistance } from '../shielding/stitching.method'
+import { currentInterruptSnubber } from '../snubber/current-interrupt.method'
+import { rcSnubberLoss } from '../snubber/rc-loss.method'
 import { rcSnubber } from '../snubber/rc-snubber.method'
 import { rcdClamp } from '../snubber/rcd-clamp.method'
+import { ringDecay } from '../snubber/ring-decay.method'
 import { ringInductance } from '../snubber/ring-inductance.method'
 import { ringParasitics } from '../snubber/ring-parasitics.method'
 import { decibelConversion } from '../spectrum/decibel-conversion.method'
@@ -50,7 +57,16 @@ export type MethodGroup = { readonly title: string; readonly methods: readonly R
 export const methodGroups: readonly MethodGroup[] = [
   {
     title: 'Ringing and snubbers',
-    methods: [register(ringParasitics), register(ringInductance), register(rcSnubber), register(rcdClamp)],
+    methods: [
+      register(ringParasitics),
+      register(ringInductance),
+      register(ringDecay),
+      register(rcSnubber),
+      register(rcSnubberLoss),
+      register(rcdClamp),
+      register(currentInterruptSnubber),
+      register(preferredValue),
+    ],
   },
   {
     title: 'Spectrum and limits',
@@ -85,11 +101,16 @@ export const methodGroups: readonly MethodGroup[] = [
   },
   {
     title: 'Emission and near field',
-    methods: [register(smallLoopEmission), register(cableEmission)],
+    methods: [
+      register(smallLoopEmission),
+      register(cableEmission),
+      register(magneticDipoleField),
+      register(polygonNearField),
+    ],
   },
   {
     title: 'Return paths and shielding',
-    methods: [register(planeShield), register(stitchingDistance)],
+    methods: [register(planeShield), register(stitchingDistance), register(groundingReview)],
   },
   {
     title: 'Input filters',

@@ -1,0 +1,100 @@
+import { execFileSync, spawnSync } from 'node:child_process'
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+
+import fc from 'fast-check'
+import { afterAll, describe, expect, it } from 'vitest'
+
+import { interruptOptimum, interruptPeak } from '@/lib/core/snubber/current-interrupt'
+
+const version = /ngspice-\d+/u.exec(
+  spawnSync('ngspice', ['--version'], { encoding: 'utf8' }).stdout ?? '',
+)?.[0]
+const folder = mkdtempSync(join(tmpdir(), 'interrupt-'))
+
+afterAll(() => rmSync(folder, { recursive: true, force: true }))
+
+// Source: numeric optimum of the same circuit by ODE integration; chi = 1 as remembered from McMurray 1972 (from memory).
+describe('the optimum for an interrupted current', () => {
+  it.each([
+    [0.2, 2.5459, 1.0358],
+    [0.3, 1.7316, 1.0746],
+    [0.5, 1.0957, 1.1773],
+    [0.7, 0.8335, 1.3005],
+    [1, 0.645, 1.5062],
+    [1.5, 0.5062, 1.876],
+    [2, 0.4405, 2.261],
+    [3, 0.3779, 3.0494],
+    [5, 0.3305, 4.6511],
+  ])('at χ = %d has ζ = %d and a peak of %d E', (chi, zeta, peak) => {
+    const optimum = interruptOptimum({ source: 1, inductance: 1, current: chi, snubberCapacitance: 1 })
+    expect(optimum.dampingRatio / zeta).toBeCloseTo(1, 2)
+    expect(optimum.peakVoltage).toBeCloseTo(peak, 4)
+  })
+
+  it('is no worse than any other resistor', () => {
+    const factor = fc.double({ min: 0.05, max: 20, noNaN: true })
+    fc.assert(
+      fc.property(factor, fc.double({ min: 0.02, max: 50, noNaN: true }), (chi, zeta) => {
+        const { peakVoltage } = interruptOptimum({
+          source: 1,
+          inductance: 1,
+          current: chi,
+          snubberCapacitance: 1,
+        })
+        expect(peakVoltage).toBeLessThanOrEqual(interruptPeak(chi, zeta) + 1e-6)
+      }),
+    )
+  })
+
+  it('passes smoothly through critical damping', () => {
+    const [below, at, above] = [1 - 1e-7, 1, 1 + 1e-7].map((zeta) => interruptPeak(0.4, zeta))
+    expect(below).toBeCloseTo(at ?? 0, 6)
+    expect(above).toBeCloseTo(at ?? 0, 6)
+  })
+})
+
+const circuit = { source: 48, inductance: 60e-9, current: 10, snubberCapacitance: 2.2e-9 }
+
+function netlistOf(resistance: number, output: string): string {
+  return [
+    'A current interrupted in an inductance',
+    `V1 source 0 ${circuit.source}`,
+    `L1 source switch ${circuit.inductance} ic=${circuit.current}`,
+    `R1 switch a ${resistance}`,
+    `C1 a 0 ${circuit.snubberCapacitance} ic=0`,
+    '.options reltol=1e-7 abstol=1e-12 vntol=1e-9',
+    '.control',
+    'set wr_singlescale',
+    'tran 10p 200n 0 10p uic',
+    `wrdata ${output} v(switch)`,
+    'quit',
+    '.endc',
+    '.end',
+  ].join('\n')
+}
+
+function peakBySimulation(resistance: number): number {
+  const [netlist, output] = [join(folder, 'interrupt.cir'), join(folder, 'interrupt.data')]
+  writeFileSync(netlist, netlistOf(resistance, output))
+  execFileSync('ngspice', ['-b', netlist], { stdio: 'ignore' })
+  const voltages = readFileSync(output, 'utf8')
+    .trim()
+    .split('\n')
+    .map((row) => Number(row.trim().split(/\s+/u)[1]))
+  // The first instants are the simulator's start from its initial conditions.
+  return Math.max(...voltages.slice(2))
+}
+
+// Source: a transient analysis by ngspice, a circuit simulator of its own.
+describe.skipIf(version === undefined)(
+  version === undefined ? 'the peak against ngspice (skipped: not installed)' : `the peak against ${version}`,
+  () => {
+    it.each([0.5, 1, 2])('agrees within 0.1 % at %d times the optimal resistor', (factor) => {
+      const optimum = interruptOptimum(circuit)
+      const exact = circuit.source * interruptPeak(optimum.currentFactor, factor * optimum.dampingRatio)
+      expect(peakBySimulation(factor * optimum.resistance) / exact).toBeCloseTo(1, 3)
+    })
+  },
+)
