@@ -36,9 +36,15 @@ export function readHeading(bytes: Uint8Array, layout: Layout): Heading {
 
 /** The cells of a line if there are as many as columns; a separator at the end begins no cell. */
 function cellsOf(line: string, separator: string, columns: number): readonly string[] | null {
+  const ways = separator === ' ' ? [/\s{2,}/u, /\s+/u] : [separator]
+  const fitting = ways.map((way) => cellsBy(line, way, columns)).find((cells) => cells.length === columns)
+  return fitting ?? null
+}
+
+function cellsBy(line: string, separator: string | RegExp, columns: number): readonly string[] {
   const cells = line.split(separator).map(unquoted)
   if (cells.length === columns + 1 && cells.at(-1) === '') cells.pop()
-  return cells.length === columns ? cells : null
+  return cells
 }
 
 function unitsIn(row: readonly string[] | null | undefined) {

@@ -1,5 +1,6 @@
 import { ascii } from './ascii'
 import { NumberScanner } from './number-scanner'
+import { overRangeAt } from './over-range'
 import { firstLines, type Line } from './text-lines'
 
 /** How the numbers of a file are laid out. */
@@ -21,7 +22,8 @@ export const mostColumns = 256
 /** So many rows of numbers in a row are the data; fewer may be values among the lines before it. */
 const rowsThatTell = 3
 
-const separators = [ascii.tab, ascii.semicolon, ascii.comma] as const
+/** Spaces come last: they also stand beside the others. */
+const separators = [ascii.tab, ascii.semicolon, ascii.comma, ascii.space] as const
 
 /** The separator under which the most columns of numbers are found, and where they begin; null where there are none. */
 export function findLayout(bytes: Uint8Array): Layout | null {
@@ -56,9 +58,14 @@ function numbersIn(bytes: Uint8Array, line: Line, separator: number): number {
   let position = skipSpaces(bytes, line.start, line.end)
   if (position === line.end) return blank
   for (let columns = 1; columns <= mostColumns; columns += 1) {
-    if (Number.isNaN(scanner.read(position))) return 0
-    position = skipSpaces(bytes, scanner.end, line.end)
+    const end = Number.isNaN(scanner.read(position)) ? overRangeAt(bytes, position)?.end : scanner.end
+    if (end === undefined) return 0
+    position = skipSpaces(bytes, end, line.end)
     if (position >= line.end) return columns
+    if (separator === ascii.space) {
+      if (position === end) return 0
+      continue
+    }
     if (bytes[position] !== separator) return 0
     position = skipSpaces(bytes, position + 1, line.end)
     // A separator at the end of every row, as some exports have it, begins no column.

@@ -4,10 +4,16 @@ import { ascii } from './ascii'
 import type { CaptureError } from './capture'
 import type { Layout } from './layout'
 import { NumberScanner } from './number-scanner'
+import { boundOverRange, overRangeAt } from './over-range'
 import { countLines, textOf } from './text-lines'
 
 /** The numbers of a file, column by column, as they are written. */
-export type Columns = { readonly rows: number; readonly columns: readonly Float64Array[] }
+export type Columns = {
+  readonly rows: number
+  readonly columns: readonly Float64Array[]
+  /** How many samples of each column are written as beyond the range; they hold the extreme of the rest. */
+  readonly overRange: readonly number[]
+}
 
 type Fault = { readonly row: number; readonly column: number; readonly position: number }
 
@@ -27,20 +33,43 @@ export function readColumns(bytes: Uint8Array, layout: Layout): Result<Columns, 
       continue
     }
     for (let column = 0; column < columns.length; column += 1) {
-      const value = scanner.read(position)
-      const end = skipSpaces(bytes, scanner.end)
+      const read = scanner.read(position)
+      const beyond = Number.isNaN(read) ? overRangeAt(bytes, position) : null
+      const cellEnd = beyond?.end ?? scanner.end
+      const end = skipSpaces(bytes, cellEnd)
       const last = column === columns.length - 1
-      if (!Number.isFinite(value) || !endsWell(bytes, end, last, layout.separator)) {
+      const isNumber = beyond !== null || Number.isFinite(read)
+      if (!isNumber || !(last ? endsRow(bytes, end, layout) : endsCell(bytes, cellEnd, end, layout))) {
         return err(faultAt(bytes, layout, scanner, { row: line, column: column + 1, position }))
       }
       const values = columns[column]
-      if (values !== undefined) values[rows] = value
-      position = last ? afterRow(bytes, end) : skipSpaces(bytes, end + 1)
+      if (values !== undefined) values[rows] = beyond?.value ?? read
+      position = last ? afterRow(bytes, end) : nextCell(bytes, end, layout)
     }
     rows += 1
   }
-  return ok({ rows, columns: columns.map((values) => values.subarray(0, rows)) })
+  return bounded(
+    columns.map((values) => values.subarray(0, rows)),
+    layout,
+  )
 }
+
+function bounded(columns: readonly Float64Array[], layout: Layout): Result<Columns, CaptureError> {
+  const overRange: number[] = []
+  for (const [index, values] of columns.entries()) {
+    const beyond = boundOverRange(values)
+    if (beyond === null) return err(allBeyond(layout.heading.length + 1, index + 1))
+    overRange.push(beyond)
+  }
+  return ok({ rows: columns[0]?.length ?? 0, columns, overRange })
+}
+
+const allBeyond = (row: number, column: number): CaptureError => ({
+  code: 'bad_number',
+  message: `Column ${column} holds nothing within the range of the instrument, from row ${row} on; take it out, or measure again with a wider range.`,
+  row,
+  column,
+})
 
 const isLineEnd = (byte: number | undefined): boolean =>
   byte === undefined || byte === ascii.lineFeed || byte === ascii.carriageReturn
@@ -51,11 +80,15 @@ function skipSpaces(bytes: Uint8Array, start: number): number {
   return position
 }
 
-function endsWell(bytes: Uint8Array, end: number, last: boolean, separator: number): boolean {
-  if (!last) return bytes[end] === separator
-  if (isLineEnd(bytes[end])) return true
-  return bytes[end] === separator && isLineEnd(bytes[skipSpaces(bytes, end + 1)])
-}
+/** Between two cells: the separator, or the spaces themselves. */
+const endsCell = (bytes: Uint8Array, cellEnd: number, end: number, { separator }: Layout): boolean =>
+  separator === ascii.space ? end > cellEnd && !isLineEnd(bytes[end]) : bytes[end] === separator
+
+const nextCell = (bytes: Uint8Array, end: number, { separator }: Layout): number =>
+  separator === ascii.space ? end : skipSpaces(bytes, end + 1)
+
+const endsRow = (bytes: Uint8Array, end: number, { separator }: Layout): boolean =>
+  isLineEnd(bytes[end]) || (bytes[end] === separator && isLineEnd(bytes[skipSpaces(bytes, end + 1)]))
 
 const afterRow = (bytes: Uint8Array, end: number): number => {
   if (bytes[end] === ascii.lineFeed) return end + 1
@@ -82,12 +115,13 @@ function faultAt(bytes: Uint8Array, layout: Layout, scanner: NumberScanner, faul
     return of(`${place} is empty; fill the cell in or take the row out, then send the file again.`)
   }
   const value = scanner.read(position)
-  if (skipSpaces(bytes, scanner.end) < end || Number.isNaN(value)) {
+  const isBeyond = Number.isNaN(value) && overRangeAt(bytes, position)?.end === end
+  if (!isBeyond && (skipSpaces(bytes, scanner.end) < end || Number.isNaN(value))) {
     return of(
       `${place} holds “${cell}”, which is not a number as in the rows before it; correct it or cut the file off there.`,
     )
   }
-  if (!Number.isFinite(value)) {
+  if (!isBeyond && !Number.isFinite(value)) {
     return of(`${place} holds “${cell}”, which is too large for a number; correct it or take the row out.`)
   }
   return of(

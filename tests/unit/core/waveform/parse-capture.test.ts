@@ -57,6 +57,70 @@ describe('layouts that parseCapture reads', () => {
     expect(capture.intervalSource).toContain('rounded')
   })
 
+  it('reads quoted numbers, with a decimal comma too, and quoted titles with a comma within', () => {
+    expect(numbersOf('"time, s","u, V"\n"0,0","1,25"\n"1,0","-2,5e0"\n"2,0","3"\n')).toEqual([
+      [1.25, -2.5, 3],
+    ])
+    expect(parsed('"time, s","out, mV"\n"0","1"\n"1","2"\n"2","3"\n').channels[0]).toMatchObject({
+      name: 'out',
+      unit: 'V',
+    })
+  })
+
+  it('reads lines that end with a carriage return alone, and counts rows by them', () => {
+    expect(numbersOf('time [s],u [V]\r0,1\r1,2\r2,3\r')).toEqual([[1, 2, 3]])
+    expect(parse('time [s],u [V]\r0,1\r1,2\r2,3\r3,x\r')).toMatchObject({
+      ok: false,
+      error: { row: 5, column: 2 },
+    })
+  })
+
+  it('reads columns that spaces separate, with titles', () => {
+    const capture = parsed('time (s)    out (mV)\n  0.0    1.5\n  1.0   -2.5 \n  2.0    3\n')
+    expect(capture.channels[0]?.values).toEqual(Float64Array.of(0.0015, -0.0025, 0.003))
+    expect(capture).toMatchObject({ intervalSeconds: 1, channels: [{ name: 'out', unit: 'V' }] })
+    expect(numbersOf('t u v\n0 1 2\n1 2 3\n2 3 4\n')).toEqual([
+      [1, 2, 3],
+      [2, 3, 4],
+    ])
+  })
+
+  it.each([
+    ['little', true],
+    ['big', false],
+  ])('reads UTF-16 with a byte order mark, %s end first', (_, isLittle) => {
+    const text = '\uFEFFZeit (µs);U (mV)\r\n0;1\r\n2;3\r\n4;5\r\n'
+    const view = new DataView(new ArrayBuffer(2 * text.length))
+    for (let index = 0; index < text.length; index += 1)
+      view.setUint16(2 * index, text.charCodeAt(index), isLittle)
+    expect(parseCapture(new Uint8Array(view.buffer))).toMatchObject({
+      ok: true,
+      value: {
+        intervalSeconds: 2e-6,
+        channels: [{ name: 'U', values: Float64Array.of(0.001, 0.003, 0.005) }],
+      },
+    })
+  })
+
+  it('leaves out NULs that pad the end of a file', () => {
+    expect(numbersOf(`time [s],u [V]\n0,1\n1,2\n2,3\n${'\u0000'.repeat(512)}`)).toEqual([[1, 2, 3]])
+  })
+
+  it('takes samples beyond the range as the extreme of the rest, and says so', () => {
+    const capture = parsed('time [s],u [V],w [V]\n0,inf,1\n1,2,1\n2,-3,1\n3,-Infinity,1\n4,∞,1\n')
+    expect(capture.channels[0]?.values).toEqual(Float64Array.of(2, 2, -3, -3, 2))
+    expect(capture.warnings).toEqual([
+      '3 samples of “u” lie beyond the range of the instrument; they are taken as its extreme.',
+    ])
+  })
+
+  it('refuses a channel that holds nothing within the range', () => {
+    expect(parse('time [s],u [V]\n0,inf\n1,inf\n2,-inf\n')).toMatchObject({
+      ok: false,
+      error: { code: 'bad_number', column: 2 },
+    })
+  })
+
   it('says what it had to assume', () => {
     expect(parsed('t,v\n0,1\n1,2\n2,3\n').warnings).toEqual([
       'No unit is given for the time column; seconds are assumed.',
@@ -87,12 +151,7 @@ describe('what parseCapture refuses, with the place and what to do', () => {
       'bad_number',
       { row: 5, column: 1 },
     ],
-    [
-      'NUL among the numbers',
-      `${head.repeat(1)}${'3,4\n'.repeat(20_000)}\u0000`,
-      'bad_number',
-      { row: 20_005 },
-    ],
+    ['NUL among the numbers', `${head}${'3,4\n'.repeat(20_000)}\u0000\n3,4\n`, 'bad_number', { row: 20_005 }],
     ['a gap in time', 'time [s],u [V]\n0,1\n1,1\n2,1\n3,1\n50,1\n51,1\n', 'uneven_time', { column: 1 }],
     ['time going back', 'time [s],u [V]\n0,1\n1,1\n2,1\n1,1\n4,1\n', 'uneven_time', { row: 5, column: 1 }],
   ])('refuses %s', (_, text, code, place) => {
