@@ -6,6 +6,9 @@ type Means = {
   readonly rest: number
 }
 
+/** Twice what the smallest complement that is a number takes. */
+const mostRounds = 40
+
 /**
  * K(k) = π / (2 agm(1, k′)) and E(k) = K (1 − Σ 2ⁿ⁻¹ cₙ²), c₀ = k. Both moduli are asked for, so that neither is lost
  * where it is small against the other. Source: NIST Digital Library of Mathematical Functions, 19.8(i).
@@ -13,7 +16,8 @@ type Means = {
 function means(modulus: number, complement: number): Means {
   let [a, b, c] = [1, complement, modulus]
   let [rest, weight] = [0, 0.5]
-  while (c > 1e-17 * a) {
+  if (!(b > 0)) return { first: Number.POSITIVE_INFINITY, rest: 0 }
+  for (let round = 0; round < mostRounds && c > 1e-17 * a; round += 1) {
     const next = (a + b) / 2
     c = (c * c) / (4 * next)
     b = Math.sqrt(a * b)

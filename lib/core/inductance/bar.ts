@@ -1,5 +1,5 @@
 import { vacuumPermeability } from '../physics/constants'
-import { gaussRule } from './gauss-legendre'
+import { gaussLegendre, gaussRule } from './gauss-legendre'
 import { parallelFilaments } from './parallel-filaments'
 import { tanhSinh } from './tanh-sinh'
 
@@ -35,16 +35,10 @@ function wedgeAlong(length: number, reach: number, slope: number): number {
     const distance = Math.sqrt(p * p + u * u)
     return u * (1 - u) * (1 - slope * u) * (Math.log(p + distance) - p / (distance + u))
   }
-  return length * (logarithm + (p > 1.5 ? gaussOnUnit(rest) : tanhSinh(0, 1, rest)))
+  return length * (logarithm + (p > 1.5 ? gaussLegendre(rayRule, 0, 1, rest) : tanhSinh(0, 1, rest)))
 }
 
-const { nodes, weights } = gaussRule(14)
-
-function gaussOnUnit(f: (u: number) => number): number {
-  let sum = 0
-  for (const [index, node] of nodes.entries()) sum += (weights[index] ?? 0) * f((1 + node) / 2)
-  return sum / 2
-}
+const rayRule = gaussRule(14)
 
 /**
  * The usual approximation for a bar, henries: L = (µ₀ l/2π) [ln(2l/(w + t)) + ½ + 0.2235 (w + t)/l]. Within 0.1 % at
@@ -66,7 +60,8 @@ export function barMutual(first: Bar, second: Bar, offset: BarOffset): number {
   const upPieces = piecesOf(first.thickness, second.thickness, offset.up)
   const filaments = (distance: number): number =>
     parallelFilaments({ length1: first.length, length2: second.length, distance, offset: offset.along })
-  const cells = acrossPieces.flatMap((x) => upPieces.map((y) => cellMean(x, y, filaments)))
+  const integral = areApart(first, second, offset) ? farIntegral : tanhSinh
+  const cells = acrossPieces.flatMap((x) => upPieces.map((y) => cellMean(x, y, filaments, integral)))
   return cells.reduce((sum, cell) => sum + cell, 0)
 }
 
@@ -85,10 +80,29 @@ function piecesOf(first: number, second: number, offset: number): readonly Piece
   return ends.slice(1).map((to, index) => ({ from: ends[index] ?? to, to, density }))
 }
 
-function cellMean(x: Piece, y: Piece, filaments: (distance: number) => number): number {
-  return tanhSinh(x.from, x.to, (across) => {
+type Integral = (start: number, end: number, f: (x: number) => number) => number
+
+const farRule = gaussRule(12)
+
+const farIntegral: Integral = (start, end, f) => gaussLegendre(farRule, start, end, f)
+
+/** Whether the bars are farther apart than their sections are wide: then the mutual inductance varies smoothly. */
+function areApart(first: Bar, second: Bar, { across, up, along }: BarOffset): boolean {
+  const gap = Math.hypot(
+    gapOf(first.width, second.width, across),
+    gapOf(first.thickness, second.thickness, up),
+    gapOf(first.length, second.length, along),
+  )
+  return gap >= Math.max(first.width, first.thickness, second.width, second.thickness)
+}
+
+const gapOf = (first: number, second: number, offset: number): number =>
+  Math.max(0, offset - first, -offset - second)
+
+function cellMean(x: Piece, y: Piece, filaments: (distance: number) => number, integral: Integral): number {
+  return integral(x.from, x.to, (across) => {
     const weight = x.density(across)
     if (!(weight > 0)) return 0
-    return weight * tanhSinh(y.from, y.to, (up) => y.density(up) * filaments(Math.hypot(across, up)))
+    return weight * integral(y.from, y.to, (up) => y.density(up) * filaments(Math.hypot(across, up)))
   })
 }

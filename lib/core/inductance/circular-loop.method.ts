@@ -1,7 +1,7 @@
 import { defineMethod, noSolution } from '../method/method'
 import { main, step } from '../method/result-value'
 import { err, ok } from '../result'
-import { conductingRing } from './conducting-ring'
+import { conductingRing, thickestRing } from './conducting-ring'
 import { currentModelSpread, derivedHere, lengthInput, loopCautions } from './inductance-inputs'
 import { circularLoop, circularLoopSecondOrder } from './loop'
 
@@ -40,7 +40,7 @@ export const circularLoopInductance = defineMethod({
   ],
   example: { radius: '10 mm', wireRadius: '0.5 mm' },
   compute: ({ radius, wireRadius }) => {
-    if (wireRadius >= radius)
+    if (wireRadius / radius > thickestRing)
       return err(noSolution('The wire must be thinner than the loop is wide.', 'wireRadius'))
     const surface = circularLoop(radius, wireRadius, 'surface')
     const uniform = circularLoop(radius, wireRadius, 'uniform')

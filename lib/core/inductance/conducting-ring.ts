@@ -1,8 +1,11 @@
 import { completeE, completeK } from '../elliptic/complete-integrals'
 import { vacuumPermeability } from '../physics/constants'
 
+/** The thickest wire, r/a, whose series is summed: beyond it the hole of the ring is as good as closed. */
+export const thickestRing = 1 - 1e-6
+
 /**
- * Inductance of a perfectly conducting ring of round wire, henries: exact for any r/a below 1.
+ * Inductance of a perfectly conducting ring of round wire, henries: exact for any r/a up to 1 − 10⁻⁶.
  *
  * In toroidal coordinates, cosh η = a/r on the surface and c = √(a² − r²), the flux function is
  * c sinh η (cosh η − cos θ)^(−½) Σ cₙ P¹ₙ₋½(cosh η) cos nθ. It is constant on the surface, which gives the cₙ from the

@@ -13,6 +13,19 @@ export function gaussRule(count: number): GaussRule {
   return rule
 }
 
+/** ∫ f over start…end by a rule: for functions that are smooth well beyond the ends. */
+export function gaussLegendre(
+  { nodes, weights }: GaussRule,
+  start: number,
+  end: number,
+  f: (x: number) => number,
+): number {
+  const [middle, half] = [(start + end) / 2, (end - start) / 2]
+  let sum = 0
+  for (const [index, node] of nodes.entries()) sum += (weights[index] ?? 0) * f(middle + half * node)
+  return half * sum
+}
+
 function nodeOf(count: number, index: number): readonly [node: number, weight: number] {
   let node = -Math.cos((Math.PI * (index + 0.75)) / (count + 0.5))
   let slope = 1

@@ -1,7 +1,7 @@
 import { z } from 'zod'
 
 import { coaxialCircles, fluxThroughInnerEdge } from '@/lib/core/inductance/coaxial-circles'
-import { conductingRing } from '@/lib/core/inductance/conducting-ring'
+import { conductingRing, thickestRing } from '@/lib/core/inductance/conducting-ring'
 import {
   circularLoop,
   circularLoopSecondOrder,
@@ -40,7 +40,7 @@ export const loopTopics: Topics = {
   ...partialTopics,
   'loop.circular': finiteTopic(z.object({ radius: positive, wire_radius: positive }), (inputs) => {
     const [a, r] = [inputs.radius, inputs.wire_radius]
-    if (r >= a) return err('wire_radius: the wire must be thinner than the loop is wide')
+    if (r / a > thickestRing) return err('wire_radius: the wire must be thinner than the loop is wide')
     return ok({
       l_surface_thin: circularLoop(a, r, 'surface'),
       l_uniform_thin: circularLoop(a, r, 'uniform'),

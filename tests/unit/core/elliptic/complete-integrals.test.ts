@@ -14,6 +14,8 @@ describe('complete elliptic integrals', () => {
     expect(completeK(0)).toBeCloseTo(Math.PI / 2, 15)
     expect(completeE(0)).toBeCloseTo(Math.PI / 2, 15)
     expect(completeE(1)).toBe(1)
+    expect(completeK(1 + 2 ** -52, 0)).toBe(Infinity)
+    expect(completeK(1, 1e-300)).toBeCloseTo(Math.log(4e300), 9)
   })
 
   it('fulfil Legendre’s relation: E K′ + E′ K − K K′ = π/2', () => {
