@@ -46,8 +46,8 @@ function histogramOf(values: Float64Array, minimum: number, range: number): Hist
   const counts = new Float64Array(size)
   const sums = new Float64Array(size)
   const scale = size / range
-  for (const value of values) {
-    const above = value - minimum
+  for (let index = 0; index < values.length; index += 1) {
+    const above = (values[index] ?? 0) - minimum
     const bin = Math.min(size - 1, (above * scale) | 0)
     counts[bin] = (counts[bin] ?? 0) + 1
     sums[bin] = (sums[bin] ?? 0) + above

@@ -14,7 +14,7 @@ import type { ValueSummary } from './value-range'
 
 /** So many edges are timed, and so many followed by a fit of their ring; of more, a spread choice. */
 const mostTimed = 8192
-const mostFollowed = 24
+const mostFollowed = 16
 
 /** A deviation from a level is no noise from so many deviations of it on, so many steps, or this part of the step. */
 const deviations = 5

@@ -21,14 +21,16 @@ export function summariseValues(values: Float64Array): ValueSummary | null {
   let square = 0
   const first = values[0] ?? 0
   let previous = first
-  for (const value of values) {
+  for (let index = 0; index < values.length; index += 1) {
+    const value = values[index] ?? 0
     if (value < minimum) minimum = value
     if (value > maximum) maximum = value
-    const size = Math.abs(value - previous)
+    const size = value > previous ? value - previous : previous - value
     if (size > 0 && size < step) step = size
     previous = value
-    sum += value - first
-    square += (value - first) ** 2
+    const above = value - first
+    sum += above
+    square += above * above
   }
   if (!Number.isFinite(square)) return null
   const mean = sum / values.length

@@ -30,7 +30,8 @@ export function boundOverRange(values: Float64Array): number | null {
   let high = -Infinity
   let low = Infinity
   let beyond = 0
-  for (const value of values) {
+  for (let index = 0; index < values.length; index += 1) {
+    const value = values[index] ?? 0
     if (value === Infinity || value === -Infinity) beyond += 1
     else {
       if (value > high) high = value
