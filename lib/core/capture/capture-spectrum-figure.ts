@@ -45,7 +45,7 @@ function describe(
     strongest === undefined
       ? ''
       : ` The strongest lies at ${quantityText(strongest.frequency, 'Hz')} with ${quantityText(strongest.level, 'dBµV')}.`
-  return `${count} sines stand above the noise in a resolution bandwidth of ${bandwidth}.${most}`
+  return `Lines above the noise: ${count}, in a resolution bandwidth of ${bandwidth}.${most}`
 }
 
 function highestOfColumns(

@@ -120,7 +120,7 @@ describe('the method of the spectrum of a capture', () => {
     const highest = Math.max(...(levels?.y ?? []))
     expect(highest).toBeLessThan(levelOfPeak(1))
     expect(highest).toBeGreaterThan(levelOfPeak(1) - 1.43)
-    expect(figure.description).toContain('The strongest lies at 1.000 MHz')
+    expect(figure.description).toContain('The strongest lies at 1.000\u00A0MHz')
   })
 
   it('offers every window, and is named for runs and reports', () => {
