@@ -15,6 +15,9 @@ const periodsEnough = 100
 
 const mostHarmonics = 4000
 
+/** Longer records of few periods are read at a length that transforms quickly: their harmonics lie far below the rate. */
+const longestExact = 2 ** 19
+
 /** A sine stands above the noise from so many times its rms in a bin on; by chance one bin of 10⁵ does. */
 const aboveNoise = 3.4
 
@@ -75,8 +78,10 @@ function linesOf(values: Float64Array, period: number): Lines | null {
   }
   const length = wholePeriods(values.length, period)
   if (length === 0) return null
-  const transform = transformReal(values.subarray(0, length))
-  return { transform, scale: scaleOf(length, 1), window: rectangular, spacing: length / period }
+  const whole = values.subarray(0, length)
+  const record = length > longestExact ? stretched(whole, longestSmoothLength(length)) : whole
+  const transform = transformReal(record)
+  return { transform, scale: scaleOf(record.length, 1), window: rectangular, spacing: length / period }
 }
 
 /** Of the numbers of periods that fill at least half a record, the samples of the one nearest to whole samples. */
@@ -90,6 +95,16 @@ function wholePeriods(samples: number, period: number): number {
     if (off < leastOff - 0.05) [best, leastOff] = [length, off]
   }
   return best
+}
+
+/** A record read at `length` points between its samples. */
+function stretched(values: Float64Array, length: number): Float64Array {
+  const step = values.length / length
+  return Float64Array.from({ length }, (_, index) => {
+    const at = Math.floor(index * step)
+    const here = values[at] ?? 0
+    return here + (index * step - at) * ((values[at + 1] ?? here) - here)
+  })
 }
 
 const scaleOf = (length: number, gain: number): number => 2 / (length * gain)

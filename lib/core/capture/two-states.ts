@@ -1,9 +1,10 @@
-import type { StateLevels, Trace } from '../ring/ring-measurement'
+import type { Ring, StateLevels, Trace } from '../ring/ring-measurement'
 import { afterEdge, type Floors } from './after-edge'
 import type { Harmonics, Period, PooledRing, TwoStates } from './capture-analysis'
 import { findEdges } from './find-edges'
 import { findPeriod, type FoundPeriod } from './find-period'
 import { harmonicsOf } from './harmonics-of'
+import { medianOf } from './median'
 import { poolOvershoot, type FollowedEdge } from './pool-overshoot'
 import { poolRings } from './pool-rings'
 import { restRatio } from './rest-ratio'
@@ -13,7 +14,7 @@ import { pooledTransition, timeEdge, type TimedEdge } from './timed-edges'
 import type { ValueSummary } from './value-range'
 
 /** So many edges are timed, and so many followed by a fit of their ring; of more, a spread choice. */
-const mostTimed = 8192
+const mostTimed = 2048
 const mostFollowed = 16
 
 /** A deviation from a level is no noise from so many deviations of it on, so many steps, or this part of the step. */
@@ -66,8 +67,19 @@ export function twoStates(
   const tried = followed.map(({ edge }) => edge)
   const ratio = restRatio(trace.values, tried, noise)
   if (!(ratio >= leastRest || decays(pooled.ring))) return null
-  const settled = settle(trace, followed, spans.length, noise)
-  const states = describeStates(trace, edges, settled, pooled, noise, stride)
+  const settled = settledLevels(trace, followed, levels)
+  const retimed = (edge: TimedEdge) =>
+    settled.base === levels.base && settled.top === levels.top
+      ? edge
+      : timeEdge(trace.values, edge, settled, noise)
+  const states = describeStates(
+    trace,
+    edges.map(retimed),
+    followed.map(({ edge, after }) => ({ edge: retimed(edge), after })),
+    pooled,
+    noise,
+    stride,
+  )
   const isDoubtful =
     ratio < surelyRests &&
     (states?.harmonics ? powerOf(states.harmonics) < mostOfPower * deviation ** 2 : true)
@@ -81,35 +93,32 @@ const powerOf = ({ list }: Harmonics): number =>
 const decays = (ring: PooledRing | null): boolean =>
   ring !== null && ring.confidence !== 'low' && ring.dampingRatio.value > leastDamping
 
-/** The level after the only edge is that of the fitted ring where the ring has not died away. */
-function settle(
-  trace: Trace,
-  followed: readonly FollowedEdge[],
-  all: number,
-  noise: number,
-): readonly FollowedEdge[] {
-  const [only] = followed
-  const ring = only?.after.ring ?? null
-  if (all !== 1 || only === undefined || ring === null) return followed
-  const { edge, after } = only
-  const end = trace.startSeconds + edge.stateEnd * trace.intervalSeconds
-  const left = ring.fit.amplitude * Math.exp(-ring.fit.decayRate * (end - ring.fit.startSeconds))
-  if (left <= diedAway * Math.abs(edge.after - edge.before)) return followed
-  const [base, top] =
-    edge.direction === 'rising' ? [edge.before, ring.fit.level] : [ring.fit.level, edge.before]
-  return [{ after, edge: timeEdge(trace.values, edge, { base, top }, noise) }]
+/** The levels to which rings settle that have not died away where their states end; else those of the histogram. */
+function settledLevels(trace: Trace, followed: readonly FollowedEdge[], levels: StateLevels): StateLevels {
+  const levelAfter = (direction: TimedEdge['direction']) => {
+    const fits = followed.flatMap(({ edge, after: { ring } }) =>
+      edge.direction === direction && ring !== null && isLeft(trace, edge, ring) ? [ring.fit.level] : [],
+    )
+    return fits.length === 0 ? null : medianOf(fits)
+  }
+  return { base: levelAfter('falling') ?? levels.base, top: levelAfter('rising') ?? levels.top }
+}
+
+function isLeft({ startSeconds, intervalSeconds }: Trace, edge: TimedEdge, { fit }: Ring): boolean {
+  const end = startSeconds + edge.stateEnd * intervalSeconds
+  const left = fit.amplitude * Math.exp(-fit.decayRate * (end - fit.startSeconds))
+  return left > diedAway * Math.abs(edge.after - edge.before)
 }
 
 function describeStates(
   trace: Trace,
-  timed: readonly TimedEdge[],
+  edges: readonly TimedEdge[],
   followed: readonly FollowedEdge[],
   pooled: ReturnType<typeof poolRings>,
   noise: number,
   stride: number,
 ): TwoStates | null {
   const { intervalSeconds, startSeconds, values } = trace
-  const edges = timed.length === 1 ? followed.map(({ edge }) => edge) : timed
   const [first] = edges
   if (first === undefined) return null
   const found = findPeriod({ ...middlesOf(edges), stride })
