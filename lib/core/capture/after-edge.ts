@@ -3,12 +3,15 @@ import { measureRinging } from '../ring/measure-ringing'
 import type { Ring, Trace } from '../ring/ring-measurement'
 import { ringAt } from '../ring/ring-figure'
 import { clippedSwingsEnd } from './clipped-swings'
+import { ringOverTail, type RingWithTail } from './ring-over-tail'
 
 /** What stands above noise and rounding; all in the unit of the record. */
 export type Floors = {
   /** A deviation from a level below this is noise. */
   readonly deviation: number
   readonly converterStep: number
+  /** Standard deviation from sample to sample. */
+  readonly noise: number
 }
 
 /** An edge with its own levels and how long it takes from 10 to 90 %, in samples. */
@@ -24,6 +27,8 @@ export type AfterEdge = {
   readonly peak: number
   readonly isClipped: boolean
   readonly ring: Ring | null
+  /** The exponential that the ring of a damped node rides on; null where there is none. */
+  readonly tail: RingWithTail['tail'] | null
   readonly absence: string | null
   /** Of a clipped ring: the level that its first peak had. */
   readonly reconstructedPeak: number | null
@@ -53,11 +58,13 @@ export function afterEdge(trace: Trace, edge: KnownEdge, floors: Floors): AfterE
   const measured = interpolatedPeak(values, peakAt)
   const crest = ring === null || clipped !== null ? null : coarseCrest(trace, ring, edge)
   const peak = crest ?? measured
+  const damped = ring === null ? null : ringOverTail(trace, ring, to, floors.noise)
   const isHidden = crest !== null && ring !== null && isFlattened(trace, ring, edge, peakAt, crest, floors)
   return {
     peak: Math.abs(peak - edge.after) > floors.deviation && isBeyond(edge, peak) ? peak : edge.after,
     isClipped: clipped !== null || isHidden,
-    ring,
+    ring: damped?.ring ?? ring,
+    tail: damped?.tail ?? null,
     absence,
     reconstructedPeak: clipped === null || ring === null ? crest : firstPeakOf(trace, ring, edge, peakAt),
   }

@@ -21,11 +21,12 @@ export function poolRings(
   intervalSeconds: number,
   noise: number,
 ): Pooling {
-  const rings = followed.flatMap(({ ring }) => (ring === null ? [] : [ring]))
+  const found = followed.flatMap(({ ring, tail }) => (ring === null ? [] : [{ ring, tail }]))
+  const rings = found.map(({ ring }) => ring)
   if (rings.length === 0 || 2 * rings.length < followed.length) {
     return { ring: null, absence: commonAbsence(followed) }
   }
-  const deviations = rings.map((ring) => ringDeviations(ring, intervalSeconds, noise))
+  const deviations = found.map(({ ring, tail }) => ringDeviations(ring, intervalSeconds, noise, tail))
   const fromFits = (pick: 'frequency' | 'dampingRatio') =>
     medianOf(deviations.map((deviation) => deviation?.[pick] ?? 0))
   const frequency = intervalOf(

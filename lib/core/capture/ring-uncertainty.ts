@@ -1,5 +1,6 @@
 import type { Ring } from '../ring/ring-measurement'
 import { solveLinear } from '../ring/solve-linear'
+import type { RingWithTail } from './ring-over-tail'
 
 /** Longer stretches are summed at every n-th sample, which stands for n. */
 const mostPoints = 2000
@@ -16,34 +17,31 @@ const likeNoise = 1.3
 
 /**
  * Standard deviations of the frequency and damping of one fitted ring: the diagonal of s² (JᵀJ)⁻¹, J the derivatives of
- * level + e^(−αt)(a cos ωt + b sin ωt) by its five parameters and s the rms of what the fit leaves over. Theory of
+ * level + e^(−αt)(a cos ωt + b sin ωt) + c e^(−γt) by its parameters and s the rms of what the fit leaves over. Theory of
  * non-linear least squares; the noise is taken as independent from sample to sample. Null where JᵀJ is singular.
  */
 export function ringDeviations(
   { fit, dampedFrequency }: Ring,
   intervalSeconds: number,
   noise: number,
+  tail: RingWithTail['tail'] | null,
 ): RingDeviations | null {
   const count = Math.round((fit.endSeconds - fit.startSeconds) / intervalSeconds) + 1
   const stride = Math.max(1, Math.floor(count / mostPoints))
   const omega = 2 * Math.PI * dampedFrequency * intervalSeconds
   const decay = fit.decayRate * intervalSeconds
-  const matrix = Array.from({ length: 5 }, () => [0, 0, 0, 0, 0])
+  const size = tail === null ? 5 : 7
+  const matrix = Array.from({ length: size }, () => new Array<number>(size).fill(0))
   for (let time = 0; time < count; time += stride) {
     const envelope = Math.exp(-decay * time)
     const angle = omega * time + fit.phase
     const swing = fit.amplitude * envelope * Math.cos(angle)
     const quadrature = fit.amplitude * envelope * Math.sin(angle)
-    addProduct(matrix, [
-      1,
-      swing / fit.amplitude,
-      quadrature / fit.amplitude,
-      time * swing,
-      time * quadrature,
-    ])
+    const ofRing = [1, swing / fit.amplitude, quadrature / fit.amplitude, time * swing, time * quadrature]
+    addProduct(matrix, [...ofRing, ...ofTail(tail, time * intervalSeconds)])
   }
   const varianceOf = (row: number) => {
-    const unit = [0, 0, 0, 0, 0].map((_, index) => (index === row ? 1 : 0))
+    const unit = matrix.map((_, index) => (index === row ? 1 : 0))
     return (solveLinear(matrix, unit)?.[row] ?? NaN) / stride
   }
   const perCycle = 1 / (dampedFrequency * intervalSeconds)
@@ -54,6 +52,13 @@ export function ringDeviations(
   if (!Number.isFinite(ofDecay + ofOmega)) return null
   const natural = Math.hypot(2 * Math.PI * dampedFrequency, fit.decayRate)
   return { frequency: ofOmega / (2 * Math.PI), dampingRatio: ofDecay / natural }
+}
+
+/** Derivatives of c e^(−γt) by c and by γt₀, t₀ being the inverse of γ, which keeps their sizes alike. */
+function ofTail(tail: RingWithTail['tail'] | null, time: number): readonly number[] {
+  if (tail === null) return []
+  const shape = Math.exp(-tail.rate * time)
+  return [shape, tail.amplitude * tail.rate * time * shape]
 }
 
 function addProduct(matrix: number[][], gradient: readonly number[]): void {

@@ -53,6 +53,7 @@ export function twoStates(
   const floors: Floors = {
     deviation: Math.max(deviations * noise, steps * converterStep, leastPart * (levels.top - levels.base)),
     converterStep,
+    noise,
   }
   const followed = spreadChoice(edges, mostFollowed).map((edge) => ({
     edge,
