@@ -5,7 +5,7 @@ import { nearestByRatio } from '../parts/preferred-values'
 import { ok } from '../result'
 import { interruptOptimum, interruptPeak } from './current-interrupt'
 
-const needed = { isRequired: true, above: 0, atMost: 1e12 } as const
+const needed = { isRequired: true, atLeast: 1e-15, atMost: 1e9 } as const
 
 /** RC snubber of a switch that interrupts an inductive current. */
 export const currentInterruptSnubber = defineMethod({

@@ -3,7 +3,7 @@ import { main, step } from '../method/result-value'
 import { err, ok } from '../result'
 import { settledEdgeLoss, squareWaveLoss } from './rc-loss'
 
-const needed = { isRequired: true, above: 0, atMost: 1e12 } as const
+const needed = { isRequired: true, atLeast: 1e-15, atMost: 1e12 } as const
 
 /** Heat in the resistor of an RC snubber driven by a stiff source. */
 export const rcSnubberLoss = defineMethod({
