@@ -30,5 +30,8 @@ export type CaptureAnalyser = {
 /** The identifier in the file store of one channel's samples: IEEE 754 binary64, little-endian, one after another. */
 export const channelFileOf = (evidenceId: string, channel: number): string => `${evidenceId}.ch${channel}.f64`
 
+/** The identifier, or path, of the overview of one channel: pairs of the lowest and highest of every 256 samples. */
+export const overviewBeside = (channelFile: string): string => `${channelFile}.overview`
+
 /** How many channels of one capture are kept. */
 export const mostChannels = 32

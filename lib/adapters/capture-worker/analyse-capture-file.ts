@@ -1,4 +1,4 @@
-import { open, readFile, rename } from 'node:fs/promises'
+import { readFile } from 'node:fs/promises'
 
 import { err, ok, type Result } from '@/lib/core/result'
 import type { Capture } from '@/lib/core/waveform/capture'
@@ -6,6 +6,7 @@ import { parseCapture } from '@/lib/core/waveform/parse-capture'
 import type { CaptureChannelSummary, CaptureRefusal, CaptureSummary } from '@/lib/ports/capture-analyser'
 
 import type { CaptureJob } from './capture-job'
+import { writeChannel } from './write-channel'
 
 /** Parses the text and writes each channel's samples to its file; runs in the worker thread. */
 export async function analyseCaptureFile(job: CaptureJob): Promise<Result<CaptureSummary, CaptureRefusal>> {
@@ -17,7 +18,7 @@ export async function analyseCaptureFile(job: CaptureJob): Promise<Result<Captur
   }
   for (const [position, channel] of capture.channels.entries()) {
     const file = job.channelFiles[position]
-    if (file !== undefined) await writeWhole(file, channel.values)
+    if (file !== undefined) await writeChannel(file, channel.values)
   }
   return ok(summaryOf(capture))
 }
@@ -39,19 +40,6 @@ function rangeOf(values: Float64Array): Pick<CaptureChannelSummary, 'minimum' | 
     if (value > maximum) maximum = value
   }
   return { minimum, maximum }
-}
-
-/** Beside first, synchronised, then renamed: samples under their final name are always whole. */
-async function writeWhole(file: string, values: Float64Array): Promise<void> {
-  const unfinished = `${file}.part`
-  const handle = await open(unfinished, 'w')
-  try {
-    await handle.writeFile(new Uint8Array(values.buffer, values.byteOffset, values.byteLength))
-    await handle.sync()
-  } finally {
-    await handle.close()
-  }
-  await rename(unfinished, file)
 }
 
 const tooManyChannels = (found: number, most: number): CaptureRefusal => ({

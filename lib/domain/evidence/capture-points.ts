@@ -1,9 +1,11 @@
 import 'server-only'
 
 import { decimateMinMax } from '@/lib/core/waveform/decimate-min-max'
+import { columnsOfOverview, samplesPerEntry } from '@/lib/core/waveform/overview'
+import { channelFileOf, overviewBeside } from '@/lib/ports/capture-analyser'
 import type { FileStore } from '@/lib/ports/file-store'
 
-import { readSamples } from './channel-samples'
+import { readDoubles, readSamples } from './channel-samples'
 
 export type CapturePointsDto = {
   readonly x: readonly number[]
@@ -29,7 +31,8 @@ const samplesPerRead = 65_536
 
 /**
  * The samples from `from` to `to` (seconds; one more at each side, so that a line reaches the edge of the plot) in at
- * most `buckets` columns. Read in pieces of whole columns, so that a long record never holds up the request loop.
+ * most `buckets` columns. Where a column holds many samples they are read from the overview that was made at ingest;
+ * otherwise in pieces of whole columns, so that a long record never holds up the request loop.
  */
 export async function readPoints(
   files: FileStore,
@@ -39,6 +42,35 @@ export async function readPoints(
   const first = indexAt(wanted.from, 0, base, -1)
   const last = indexAt(wanted.to, base.samples - 1, base, 1)
   const count = Math.max(1, last - first + 1)
+  return count / wanted.buckets >= 2 * samplesPerEntry
+    ? readOverview(files, wanted, base, first, last)
+    : readWhole(files, wanted, base, first, count)
+}
+
+/** Whole entries of the overview: the columns begin and end up to 255 samples beside the wanted ones. */
+async function readOverview(
+  files: FileStore,
+  { evidenceId, channel, buckets }: Wanted,
+  { startSeconds, intervalSeconds }: TimeBase,
+  first: number,
+  last: number,
+): Promise<CapturePointsDto> {
+  const firstEntry = Math.floor(first / samplesPerEntry)
+  const entries = Math.floor(last / samplesPerEntry) - firstEntry + 1
+  const id = overviewBeside(channelFileOf(evidenceId, channel))
+  const overview = await readDoubles(files, id, 2 * firstEntry, 2 * entries)
+  const { x, min, max } = columnsOfOverview(overview, buckets)
+  const begin = startSeconds + firstEntry * samplesPerEntry * intervalSeconds
+  return { x: x.map((sample) => begin + sample * intervalSeconds), min, max }
+}
+
+async function readWhole(
+  files: FileStore,
+  wanted: Wanted,
+  base: TimeBase,
+  first: number,
+  count: number,
+): Promise<CapturePointsDto> {
   const columns = Math.min(wanted.buckets, count)
   const pieces = Math.min(columns, Math.ceil(count / samplesPerRead))
   const startOf = (column: number) => first + Math.ceil((column * count) / columns)

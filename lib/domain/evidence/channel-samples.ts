@@ -13,7 +13,16 @@ export async function readSamples(
   first: number,
   count: number,
 ): Promise<Float64Array> {
-  const id = channelFileOf(evidenceId, channel)
+  return readDoubles(files, channelFileOf(evidenceId, channel), first, count)
+}
+
+/** `count` doubles of a stored file from the one numbered `first` on; fewer where the file ends. */
+export async function readDoubles(
+  files: FileStore,
+  id: string,
+  first: number,
+  count: number,
+): Promise<Float64Array> {
   const bytes = await files.readPart(id, first * bytesPerSample, count * bytesPerSample)
   return new Float64Array(bytes.buffer, bytes.byteOffset, Math.floor(bytes.byteLength / bytesPerSample))
 }
