@@ -1,15 +1,20 @@
 import type uPlot from 'uplot'
 
-import type { TimeWindow } from '@/lib/figure/time-window'
+import { nearestIndex, type TimeWindow } from '@/lib/figure/time-window'
 
-import type { CaptureMarker } from './capture-points'
+import type { CaptureMarker, CaptureTrace, TraceTone } from './capture-points'
 
-export type OverlayView = { readonly cursors: TimeWindow; readonly markers: readonly CaptureMarker[] }
+export type OverlayView = {
+  readonly cursors: TimeWindow
+  readonly markers: readonly CaptureMarker[]
+  readonly traces: readonly CaptureTrace[]
+}
 
 export type OverlayLook = {
   readonly cursor: string
   readonly marker: string
   readonly paper: string
+  readonly tone: (tone: TraceTone) => string
   readonly font: string
 }
 
@@ -78,6 +83,36 @@ const flagsOf = ({ cursors, markers }: OverlayView, look: OverlayLook): Flag[] =
   ]
 }
 
+/** The name of each trace at its right end, on the line itself; a single trace is named by its axis. */
+const drawTraceNames = (plot: uPlot, traces: readonly CaptureTrace[], look: OverlayLook) => {
+  if (traces.length < 2) return
+  const { ctx, bbox } = plot
+  const scale = pixelRatio(plot)
+  const right = plot.posToVal(plot.over.clientWidth - 1, 'x')
+  let lowest = bbox.top
+  const placed = traces
+    .map((trace, index) => ({ trace, y: endOf(plot, trace, right, index) }))
+    .sort((one, other) => one.y - other.y)
+  for (const { trace, y } of placed) {
+    const height = 17 * scale
+    const top = Math.min(Math.max(y - height / 2, lowest), bbox.top + bbox.height - height)
+    lowest = top + height
+    const width = ctx.measureText(trace.label).width + 8 * scale
+    const left = bbox.left + bbox.width - width
+    ctx.fillStyle = look.paper
+    ctx.fillRect(left, top, width, height)
+    ctx.fillStyle = look.tone(trace.tone)
+    ctx.fillText(trace.label, left + 4 * scale, top + height / 2)
+  }
+}
+
+/** The height of a trace at the right edge of the view, in canvas pixels. */
+function endOf(plot: uPlot, { points }: CaptureTrace, right: number, index: number): number {
+  const at = nearestIndex(points.x, right)
+  const level = ((points.min[at] ?? 0) + (points.max[at] ?? 0)) / 2
+  return plot.valToPos(level, plot.series[2 * index + 1]?.scale ?? 'y', true)
+}
+
 /** Draws the markers of the page and the two cursors A and B, every name above every line. */
 export const drawOverlay = (plot: uPlot, view: OverlayView, look: OverlayLook): void => {
   const { ctx } = plot
@@ -86,6 +121,7 @@ export const drawOverlay = (plot: uPlot, view: OverlayView, look: OverlayLook): 
   ctx.font = look.font
   ctx.textAlign = 'left'
   ctx.textBaseline = 'middle'
+  drawTraceNames(plot, view.traces, look)
   for (const flag of flags) drawLine(plot, flag)
   for (const flag of flags) drawName(plot, flag, look.paper)
   ctx.restore()

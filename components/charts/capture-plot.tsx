@@ -6,7 +6,7 @@ import { withinWhole, type TimeWindow } from '@/lib/figure/time-window'
 
 import { CaptureCursorSlider } from './capture-cursor-slider'
 import { windowAfterKey } from './capture-keys'
-import type { CaptureMarker, CapturePoints } from './capture-points'
+import type { CaptureMarker, CaptureTrace } from './capture-points'
 import { CaptureReadout } from './capture-readout'
 import { instantText, levelText } from './capture-text'
 import { CaptureToolbar, type DragPurpose } from './capture-toolbar'
@@ -14,13 +14,12 @@ import { CaptureValues } from './capture-values'
 import { useCaptureCanvas } from './use-capture-canvas'
 
 type CapturePlotProps = {
-  /** What was measured, on the vertical axis: "Switch node". */
-  readonly seriesLabel: string
-  readonly unit: string
-  /** The record, or the part of it in view once the page has fetched finer points. */
-  readonly points: CapturePoints
-  /** First and last instant of the whole record, when `points` holds only a part of it. */
-  readonly extent?: TimeWindow | undefined
+  /** What the plot shows, as its name: "Switch node" or "Capture o05". */
+  readonly label: string
+  /** The record, or the part of it in view once the page has fetched finer points; of at most two units. */
+  readonly traces: readonly CaptureTrace[]
+  /** First and last instant of the whole record. */
+  readonly extent: TimeWindow
   /** The view has changed: a page may answer with finer points. */
   readonly onRangeChange?: ((window: TimeWindow) => void) | undefined
   /** The two cursors, A at `from` and B at `to`; kept by the plot itself when absent. */
@@ -31,19 +30,13 @@ type CapturePlotProps = {
 
 const noMarkers: readonly CaptureMarker[] = []
 
-const extentOf = (points: CapturePoints): TimeWindow => ({
-  from: points.x[0] ?? 0,
-  to: points.x.at(-1) ?? 1,
-})
-
 const quarters = ({ from, to }: TimeWindow): TimeWindow => ({
   from: from + (to - from) / 4,
   to: to - (to - from) / 4,
 })
 
 const useCaptureState = (props: CapturePlotProps) => {
-  const [firstExtent] = useState(() => extentOf(props.points))
-  const whole = props.extent ?? firstExtent
+  const whole = props.extent
   const [window, setWindow] = useState(whole)
   const [ownCursors, setOwnCursors] = useState(() => quarters(whole))
   const [purpose, setPurpose] = useState<DragPurpose>('zoom')
@@ -65,13 +58,13 @@ const useCaptureState = (props: CapturePlotProps) => {
  * view; two sliders move the cursors.
  */
 export const CapturePlot = (props: CapturePlotProps) => {
-  const { seriesLabel, unit, points, markers = noMarkers } = props
+  const { label, traces, markers = noMarkers } = props
   const state = useCaptureState(props)
   const { whole, window, changeWindow, cursors, changeCursors } = state
   const helpId = useId()
-  const view = useMemo(() => ({ cursors, markers, seriesLabel, unit }), [cursors, markers, seriesLabel, unit])
+  const view = useMemo(() => ({ cursors, markers, traces }), [cursors, markers, traces])
   const host = useCaptureCanvas({
-    points,
+    traces,
     window,
     view,
     handlers: {
@@ -88,9 +81,14 @@ export const CapturePlot = (props: CapturePlotProps) => {
     event.preventDefault()
     changeWindow(next)
   }
-  const valueText = (instant: number) => `${instantText(instant)}, ${levelText(points, instant, unit)}`
+  const levelsAt = (instant: number) =>
+    traces.map(({ label: name, points, unit }) => {
+      const level = levelText(points, instant, unit)
+      return traces.length > 1 ? `${name} ${level}` : level
+    })
+  const valueText = (instant: number) => [instantText(instant), ...levelsAt(instant)].join(', ')
   return (
-    <figure aria-label={`Capture of ${seriesLabel}`} className="flex min-w-0 flex-col gap-2">
+    <figure aria-label={`Capture of ${label}`} className="flex min-w-0 flex-col gap-2">
       <CaptureToolbar
         {...{ window, whole, cursors }}
         purpose={state.purpose}
@@ -108,7 +106,7 @@ export const CapturePlot = (props: CapturePlotProps) => {
         ref={host}
         role="group"
         tabIndex={0}
-        aria-label={`Plot of ${seriesLabel} from ${instantText(window.from)} to ${instantText(window.to)}`}
+        aria-label={`Plot of ${label} from ${instantText(window.from)} to ${instantText(window.to)}`}
         aria-describedby={helpId}
         onKeyDown={onKeyDown}
         className="capture-host"
@@ -129,12 +127,20 @@ export const CapturePlot = (props: CapturePlotProps) => {
           onMove={(to) => changeCursors({ ...cursors, to })}
         />
       </div>
-      <CaptureReadout points={points} cursors={cursors} unit={unit} />
+      <CaptureReadout traces={traces} cursors={cursors} />
       <p id={helpId} className="no-print text-sm text-ink-faint">
         With the plot in focus: + and − zoom, the arrow keys move, Home shows the whole record. The sliders A
         and B move the cursors.
       </p>
-      <CaptureValues label={seriesLabel} unit={unit} points={points} window={window} />
+      {traces.map((trace) => (
+        <CaptureValues
+          key={trace.key}
+          label={trace.label}
+          unit={trace.unit}
+          points={trace.points}
+          window={window}
+        />
+      ))}
     </figure>
   )
 }

@@ -49,7 +49,7 @@ const columns: Column<Row>[] = [
 
 /** The part of the capture in view as a table. */
 export const CaptureValues = (props: CaptureValuesProps) => (
-  <Disclosure summary={<span className="text-sm">Values in view</span>}>
+  <Disclosure summary={<span className="text-sm">Values of {props.label} in view</span>}>
     <DataTable
       caption={`${props.label}: evenly chosen instants of what is in view`}
       columns={columns}

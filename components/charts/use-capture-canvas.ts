@@ -8,11 +8,11 @@ import {
   type CaptureHandlers,
   type CaptureView,
 } from './capture-canvas'
-import type { CapturePoints } from './capture-points'
+import type { CaptureTrace } from './capture-points'
 import { useThemeChange } from './use-theme-change'
 
 type Shown = {
-  readonly points: CapturePoints
+  readonly traces: readonly CaptureTrace[]
   readonly window: TimeWindow
   readonly view: CaptureView
   readonly handlers: CaptureHandlers
@@ -20,7 +20,7 @@ type Shown = {
 
 /** Keeps the painted plot in step with what the component shows. Returns the ref of the element to paint into. */
 export const useCaptureCanvas = ({
-  points,
+  traces,
   window,
   view,
   handlers,
@@ -28,6 +28,9 @@ export const useCaptureCanvas = ({
   const host = useRef<HTMLDivElement>(null)
   const canvas = useRef<CaptureCanvas>(null)
   const latestView = useRef(view)
+  const latestWindow = useRef(window)
+  // Another set of lines needs another plot; new points of the same lines do not.
+  const lines = traces.map(({ key, tone, unit }) => `${key} ${tone} ${unit}`).join('|')
   const latestHandlers = useRef(handlers)
 
   useEffect(() => {
@@ -48,6 +51,7 @@ export const useCaptureCanvas = ({
       onReset: () => latestHandlers.current.onReset(),
     })
     canvas.current = created
+    created.show(latestView.current.traces, latestWindow.current)
     const observer = new ResizeObserver(() => created.resize())
     observer.observe(element)
     return () => {
@@ -55,11 +59,12 @@ export const useCaptureCanvas = ({
       created.destroy()
       canvas.current = null
     }
-  }, [])
+  }, [lines])
 
   useEffect(() => {
-    canvas.current?.show(points, window)
-  }, [points, window])
+    latestWindow.current = window
+    canvas.current?.show(traces, window)
+  }, [traces, window])
 
   useThemeChange(useCallback(() => canvas.current?.redraw(), []))
   return host
