@@ -11,7 +11,13 @@ import { ChannelChoice } from './channel-choice'
 import { DifferenceChoice } from './difference-choice'
 import { SpectrumInView } from './spectrum-in-view'
 import { useTraces } from './use-traces'
-import { channelSource, differenceSource, seenTogether, type TraceSource, type ViewedCapture } from './viewed-capture'
+import {
+  channelSource,
+  differenceSource,
+  seenTogether,
+  type TraceSource,
+  type ViewedCapture,
+} from './viewed-capture'
 
 type CaptureViewerProps = {
   readonly capture: ViewedCapture
@@ -90,7 +96,10 @@ export const CaptureViewer = ({ capture, overlay = [], measureHref }: CaptureVie
 }
 
 /** With an overlay, one line of each; otherwise what fits. */
-function firstShown(sources: readonly TraceSource[], overlay: readonly TraceSource[]): readonly TraceSource[] {
+function firstShown(
+  sources: readonly TraceSource[],
+  overlay: readonly TraceSource[],
+): readonly TraceSource[] {
   const [own] = sources
   const [other] = overlay
   return own !== undefined && other !== undefined ? [own, other] : seenTogether(sources)

@@ -17,10 +17,24 @@ export const DifferenceChoice = ({ capture, onAdd }: DifferenceChoiceProps) => {
   const [one, other] = [capture.channels[plus], capture.channels[minus]]
   const isPossible = one !== undefined && other !== undefined && one !== other && one.unit === other.unit
   return (
-    <div role="group" aria-label="Difference of two channels" className="flex flex-wrap items-center gap-2 text-sm">
-      <ChannelSelect label="Channel to subtract from" channels={capture.channels} chosen={plus} onChoose={choosePlus} />
+    <div
+      role="group"
+      aria-label="Difference of two channels"
+      className="flex flex-wrap items-center gap-2 text-sm"
+    >
+      <ChannelSelect
+        label="Channel to subtract from"
+        channels={capture.channels}
+        chosen={plus}
+        onChoose={choosePlus}
+      />
       <span aria-hidden="true">−</span>
-      <ChannelSelect label="Channel to subtract" channels={capture.channels} chosen={minus} onChoose={chooseMinus} />
+      <ChannelSelect
+        label="Channel to subtract"
+        channels={capture.channels}
+        chosen={minus}
+        onChoose={chooseMinus}
+      />
       <Button size="small" disabled={!isPossible} onClick={() => isPossible && onAdd(one, other)}>
         Show the difference
       </Button>

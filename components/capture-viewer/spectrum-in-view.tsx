@@ -39,7 +39,10 @@ export const SpectrumInView = ({ sources, view }: SpectrumInViewProps) => {
     )
   }
   return (
-    <section aria-label="Spectrum of what is in view" className="flex flex-col gap-3 border-t border-rule pt-4">
+    <section
+      aria-label="Spectrum of what is in view"
+      className="flex flex-col gap-3 border-t border-rule pt-4"
+    >
       <div className="flex flex-wrap items-center gap-3">
         <label className="flex items-center gap-2 text-sm">
           Window

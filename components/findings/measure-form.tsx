@@ -17,11 +17,13 @@ export type OfferedCapture = {
 type MeasureFormProps = {
   readonly captures: readonly OfferedCapture[]
   readonly chosenId?: string | undefined
+  /** The ends of the part to look at, in seconds, where the cursors of a plot stood. */
+  readonly window?: { readonly from: string; readonly to: string } | undefined
   readonly action: FormAction
 }
 
 /** A capture, one of its channels, and the part of the record that holds the edge. */
-export const MeasureForm = ({ captures, chosenId, action }: MeasureFormProps) => {
+export const MeasureForm = ({ captures, chosenId, window, action }: MeasureFormProps) => {
   const first = captures.find((capture) => capture.evidenceId === chosenId) ?? captures[0]
   const [evidenceId, choose] = useState(first?.evidenceId ?? '')
   const capture = captures.find((candidate) => candidate.evidenceId === evidenceId)
@@ -55,6 +57,7 @@ export const MeasureForm = ({ captures, chosenId, action }: MeasureFormProps) =>
         <FormQuantity
           name="from"
           label="From"
+          defaultValue={window?.from}
           unit="s"
           optional
           hint="Just before the edge, such as −50n; the start of the record if empty."
@@ -62,6 +65,7 @@ export const MeasureForm = ({ captures, chosenId, action }: MeasureFormProps) =>
         <FormQuantity
           name="to"
           label="To"
+          defaultValue={window?.to}
           unit="s"
           optional
           hint="Just before the next edge; the end of the record if empty."

@@ -6,6 +6,7 @@ import type { Ids } from '@/lib/ports/ids'
 import type { PasswordHasher } from '@/lib/ports/password-hasher'
 import type { Payments } from '@/lib/ports/payments'
 import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
+import type { SpectrumComputer } from '@/lib/ports/spectrum-computer'
 
 /** Where a request came from, as far as it is known. */
 export type RequestInfo = {
@@ -31,6 +32,7 @@ export type Deps = {
   readonly ids: Ids
   readonly files: FileStore
   readonly captures: CaptureAnalyser
+  readonly spectra: SpectrumComputer
   readonly passwords: PasswordHasher
   readonly payments: Payments
   readonly pdf: PdfRenderer

@@ -9,6 +9,7 @@ import { createCaptureWorker } from '@/lib/adapters/capture-worker/capture-worke
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { createPdfWorker } from '@/lib/adapters/pdf-worker/pdf-worker'
 import { createResendMailer } from '@/lib/adapters/resend/resend-mailer'
+import { createSpectrumWorker } from '@/lib/adapters/spectrum-worker/spectrum-worker'
 import { createStripePayments } from '@/lib/adapters/stripe/stripe-payments'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
 import { systemClock } from '@/lib/adapters/system-clock/system-clock'
@@ -40,6 +41,7 @@ function createContainer(): Container {
       ids: randomIds,
       files,
       captures: createCaptureWorker(files),
+      spectra: createSpectrumWorker(files),
       passwords: createArgon2Hasher(),
       payments: createStripePayments(env.stripe),
       pdf: createPdfWorker(),

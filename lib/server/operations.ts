@@ -3,6 +3,7 @@ import 'server-only'
 /** The gate between pages and the domain: what `app/` may ask for, by domain. */
 export * as balances from '@/lib/domain/hours/balance.service'
 export * as books from '@/lib/domain/billing/books.service'
+export * as captureSpectra from '@/lib/domain/evidence/capture-spectrum.service'
 export * as captures from '@/lib/domain/evidence/capture.service'
 export * as certificates from '@/lib/domain/reports/certificate.service'
 export * as checkouts from '@/lib/domain/billing/checkout.service'

@@ -29,6 +29,7 @@ export const operationMatrix: Readonly<Record<string, About>> = {
   'engagements.saveScope': 'row',
   'evidence.announceUpload': 'row',
   'evidence.capturePoints': 'row',
+  'evidence.captureSpectrum': 'row',
   'evidence.getEvidence': 'row',
   'evidence.listEvidence': 'engagement',
   'evidence.openEvidenceFile': 'row',

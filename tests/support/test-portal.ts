@@ -6,6 +6,7 @@ import { openDatabase, type Db } from '@/db/client'
 import { migrate } from '@/db/migrate'
 import { createDiskFileStore } from '@/lib/adapters/file-store/disk-file-store'
 import { randomIds } from '@/lib/adapters/random-ids/random-ids'
+import { computeSpectrum } from '@/lib/adapters/spectrum-worker/compute-spectrum'
 import { createStripePayments } from '@/lib/adapters/stripe/stripe-payments'
 import type { Deps } from '@/lib/domain/deps'
 
@@ -50,6 +51,7 @@ export async function openTestPortal(): Promise<TestPortal> {
     ids: randomIds,
     files,
     captures: createInlineCaptureAnalyser(files),
+    spectra: { compute: ({ fileId, ...job }) => computeSpectrum({ path: files.pathOf(fileId), ...job }) },
     passwords: createQuickHasher(),
     payments: createStripePayments({
       secretKey: 'sk_test_of_the_test',

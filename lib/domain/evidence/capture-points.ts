@@ -16,6 +16,8 @@ export type CapturePointsDto = {
 type Wanted = {
   readonly evidenceId: string
   readonly channel: number
+  /** Taken off sample by sample. */
+  readonly minus?: number | undefined
   readonly from?: number | undefined
   readonly to?: number | undefined
   readonly buckets: number
@@ -42,7 +44,7 @@ export async function readPoints(
   const first = indexAt(wanted.from, 0, base, -1)
   const last = indexAt(wanted.to, base.samples - 1, base, 1)
   const count = Math.max(1, last - first + 1)
-  return count / wanted.buckets >= 2 * samplesPerEntry
+  return wanted.minus === undefined && count / wanted.buckets >= 2 * samplesPerEntry
     ? readOverview(files, wanted, base, first, last)
     : readWhole(files, wanted, base, first, count)
 }
@@ -79,7 +81,7 @@ async function readWhole(
     const from = Math.floor((piece * columns) / pieces)
     const to = Math.floor(((piece + 1) * columns) / pieces)
     const begin = startOf(from)
-    const samples = await readSamples(files, wanted.evidenceId, wanted.channel, begin, startOf(to) - begin)
+    const samples = await readTrace(files, wanted, begin, startOf(to) - begin)
     const start = base.startSeconds + begin * base.intervalSeconds
     const trace = decimateMinMax(samples, start, base.intervalSeconds, -Infinity, Infinity, to - from)
     points.x.push(...trace.x)
@@ -87,6 +89,19 @@ async function readWhole(
     points.max.push(...trace.max)
   }
   return points
+}
+
+/** The samples of a channel, less those of another where one is to be taken off. */
+async function readTrace(
+  files: FileStore,
+  { evidenceId, channel, minus }: Wanted,
+  first: number,
+  count: number,
+): Promise<Float64Array> {
+  const samples = await readSamples(files, evidenceId, channel, first, count)
+  if (minus === undefined) return samples
+  const other = await readSamples(files, evidenceId, minus, first, count)
+  return samples.map((value, index) => value - (other[index] ?? 0))
 }
 
 function indexAt(instant: number | undefined, otherwise: number, base: TimeBase, margin: -1 | 1): number {

@@ -15,6 +15,9 @@ export type EvidenceError = ServiceError<
   | 'content_differs'
   | 'not_a_capture'
   | 'no_such_channel'
+  | 'not_a_voltage'
+  | 'part_too_long'
+  | 'units_differ'
 >
 
 export const nameNotUsable = (message: string): EvidenceError => ({ code: 'name_not_usable', message })
@@ -68,4 +71,19 @@ export const notACapture: EvidenceError = {
 export const noSuchChannel = (channel: number): EvidenceError => ({
   code: 'no_such_channel',
   message: `The capture has no channel ${channel + 1}.`,
+})
+
+export const notAVoltage = (channel: string): EvidenceError => ({
+  code: 'not_a_voltage',
+  message: `“${channel}” is not in volts, and levels in dBµV are of voltages. Choose a channel in volts.`,
+})
+
+export const partTooLong = (most: number): EvidenceError => ({
+  code: 'part_too_long',
+  message: `At most ${most.toLocaleString('en')} samples are transformed at once. Zoom in to a shorter part of the record.`,
+})
+
+export const unitsDiffer = (one: string, other: string): EvidenceError => ({
+  code: 'units_differ',
+  message: `“${one}” and “${other}” are of different quantities, so neither can be taken off the other.`,
 })

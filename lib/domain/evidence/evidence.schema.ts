@@ -60,5 +60,7 @@ export const capturePointsSchema = z.strictObject({
   channel: z.coerce.number().int().min(0).max(63).default(0),
   from: z.coerce.number().optional(),
   to: z.coerce.number().optional(),
+  /** A channel of the same unit to be taken off, sample by sample. */
+  minus: z.coerce.number().int().min(0).max(63).optional(),
   buckets: z.coerce.number().int().min(100).max(4000).default(1000),
 })

@@ -20,7 +20,7 @@ export default async function BenchPage({
   searchParams,
 }: PageProps<'/engagements/[engagementId]/bench'>) {
   const { engagementId } = await params
-  const { capture } = await searchParams
+  const { capture, from, to } = await searchParams
   const [captures, methods, stored] = await Promise.all([
     query(measurements.listTraces, { engagementId }),
     query(runs.listMethods, { engagementId }),
@@ -41,6 +41,7 @@ export default async function BenchPage({
           <MeasureForm
             captures={captures}
             chosenId={typeof capture === 'string' ? capture : undefined}
+            window={typeof from === 'string' && typeof to === 'string' ? { from, to } : undefined}
             action={measureRing}
           />
         )}

@@ -9,6 +9,7 @@ import { Notice } from '@/components/ui/notice'
 import { TextLink } from '@/components/ui/text-link'
 import { evidence } from '@/lib/server/operations'
 import { query } from '@/lib/server/query'
+import { requireActor } from '@/lib/server/session'
 
 import { stateFacts } from './actions'
 
@@ -22,7 +23,10 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 
 export default async function EvidenceFilePage({ params }: Props) {
   const { engagementId, evidenceId } = await params
-  const file = await query(evidence.getEvidence, { evidenceId })
+  const [file, { isConsultant }] = await Promise.all([
+    query(evidence.getEvidence, { evidenceId }),
+    requireActor(),
+  ])
   if (file.engagementId !== engagementId) notFound()
   const { capture } = file
   const aside = (
@@ -44,7 +48,15 @@ export default async function EvidenceFilePage({ params }: Props) {
           {file.refusal}
         </Notice>
       ) : null}
-      {capture ? <CaptureSheets evidenceId={evidenceId} capture={capture} stateFacts={stateFacts} /> : null}
+      {capture ? (
+        <CaptureSheets
+          evidenceId={evidenceId}
+          name={file.name}
+          measureHref={isConsultant ? `/engagements/${engagementId}/bench?capture=${evidenceId}` : undefined}
+          capture={capture}
+          stateFacts={stateFacts}
+        />
+      ) : null}
       {capture || file.refusal ? null : (
         <Notice>This kind of file is kept as it was sent. Download it to look at it.</Notice>
       )}

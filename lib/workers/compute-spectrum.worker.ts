@@ -1,0 +1,1 @@
+export { computeSpectrum as default } from '@/lib/adapters/spectrum-worker/compute-spectrum'
