@@ -4,7 +4,7 @@ import { useId, useMemo, useState, type KeyboardEvent } from 'react'
 
 import { withinWhole, type TimeWindow } from '@/lib/figure/time-window'
 
-import { CaptureCursorSlider } from './capture-cursor-slider'
+import { CaptureCursors } from './capture-cursors'
 import { windowAfterKey } from './capture-keys'
 import type { CaptureMarker, CaptureTrace } from './capture-points'
 import { CaptureReadout } from './capture-readout'
@@ -111,22 +111,7 @@ export const CapturePlot = (props: CapturePlotProps) => {
         onKeyDown={onKeyDown}
         className="capture-host"
       />
-      <div>
-        <CaptureCursorSlider
-          name="A"
-          instant={cursors.from}
-          window={window}
-          valueText={valueText(cursors.from)}
-          onMove={(from) => changeCursors({ ...cursors, from })}
-        />
-        <CaptureCursorSlider
-          name="B"
-          instant={cursors.to}
-          window={window}
-          valueText={valueText(cursors.to)}
-          onMove={(to) => changeCursors({ ...cursors, to })}
-        />
-      </div>
+      <CaptureCursors {...{ cursors, window, valueText }} onMove={changeCursors} />
       <CaptureReadout traces={traces} cursors={cursors} />
       <p id={helpId} className="no-print text-sm text-ink-faint">
         With the plot in focus: + and − zoom, the arrow keys move, Home shows the whole record. The sliders A
