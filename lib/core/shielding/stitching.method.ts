@@ -1,4 +1,4 @@
-import { defineMethod } from '../method/method'
+import { defineMethod, type ResultValue } from '../method/method'
 import { main, step } from '../method/result-value'
 import { speedOfLight } from '../physics/constants'
 import { ok } from '../result'
@@ -8,10 +8,10 @@ const usualFraction = 20
 /** How close vias must stand that tie two planes or a guard together. */
 export const stitchingDistance = defineMethod({
   id: 'stitching-distance',
-  version: 1,
-  title: 'Distance of stitching vias',
+  version: 2,
+  title: 'Distance and number of stitching vias',
   purpose:
-    'Gives the largest distance between vias that tie planes or a guard ring together up to a frequency.',
+    'Gives the largest distance between vias that tie planes or a guard ring together up to a frequency, and how many a length needs.',
   inputs: {
     frequency: {
       label: 'Highest frequency',
@@ -40,8 +40,21 @@ export const stitchingDistance = defineMethod({
       atLeast: 2,
       atMost: 1000,
     },
+    length: {
+      label: 'Length to stitch',
+      symbol: 'l',
+      unit: 'm',
+      help: 'Along the edge or the guard, from its first to its last via; for their number',
+      isRequired: false,
+      above: 0,
+      atMost: 1000,
+    },
   },
-  formulas: ['λ = c / (f_max √ε_eff)', 's = λ / N'],
+  formulas: [
+    'λ = c / (f_max √ε_eff)',
+    's = λ / N',
+    'n = ⌈l/s⌉ + 1 along an open line,   ⌈l/s⌉ around a closed one',
+  ],
   notes: [
     'A twentieth of a wavelength is a rule of thumb: shorter helps, and nothing changes suddenly at it.',
   ],
@@ -52,12 +65,14 @@ export const stitchingDistance = defineMethod({
       standing: 'common practice, no source',
     },
   ],
-  example: { frequency: '1 GHz', permittivity: '4.3' },
-  compute: ({ frequency, permittivity, fraction = usualFraction }) => {
+  example: { frequency: '1 GHz', permittivity: '4.3', length: '120 mm' },
+  compute: ({ frequency, permittivity, fraction = usualFraction, length }) => {
     const wavelength = speedOfLight / (frequency * Math.sqrt(permittivity))
+    const distance = wavelength / fraction
     return ok({
       results: [
-        main('distance', 'Largest distance', 's', 'm', wavelength / fraction),
+        main('distance', 'Largest distance', 's', 'm', distance),
+        ...(length === undefined ? [] : numbersOf(length, distance)),
         step('wavelength', 'Wavelength', 'λ', 'm', wavelength),
       ],
       choices: [],
@@ -66,3 +81,13 @@ export const stitchingDistance = defineMethod({
     })
   },
 })
+
+/** Vias along an open line stand at both of its ends; around a closed one the first is the last. */
+function numbersOf(length: number, distance: number): readonly ResultValue[] {
+  // A length that is a whole number of distances, but for rounding, needs no via more.
+  const gaps = Math.ceil(length / distance - 1e-9)
+  return [
+    main('count', 'Vias along an open line', 'n', '', gaps + 1),
+    step('closedCount', 'Vias around a closed line', 'n', '', gaps),
+  ]
+}
