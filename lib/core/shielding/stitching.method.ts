@@ -46,7 +46,7 @@ export const stitchingDistance = defineMethod({
       unit: 'm',
       help: 'Along the edge or the guard, from its first to its last via; for their number',
       isRequired: false,
-      above: 0,
+      atLeast: 1e-6,
       atMost: 1000,
     },
   },
@@ -85,7 +85,7 @@ export const stitchingDistance = defineMethod({
 /** Vias along an open line stand at both of its ends; around a closed one the first is the last. */
 function numbersOf(length: number, distance: number): readonly ResultValue[] {
   // A length that is a whole number of distances, but for rounding, needs no via more.
-  const gaps = Math.ceil(length / distance - 1e-9)
+  const gaps = Math.max(1, Math.ceil(length / distance - 1e-9))
   return [
     main('count', 'Vias along an open line', 'n', '', gaps + 1),
     step('closedCount', 'Vias around a closed line', 'n', '', gaps),
