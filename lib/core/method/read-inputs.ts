@@ -57,7 +57,8 @@ function readQuantity(definition: QuantityInput, given: RawInput): Result<number
   const parsed = typeof given === 'number' ? ok(given) : parseQuantity(given, definition.unit)
   if (!parsed.ok) return err(parsed.error.message)
   const problem = boundProblem(definition, parsed.value)
-  return problem === null ? parsed : err(problem)
+  // A zero has no sign: stored as JSON it would come back without it.
+  return problem === null ? ok(parsed.value + 0) : err(problem)
 }
 
 function readChoice({ label, options }: ChoiceInput, given: RawInput): Result<string, string> {

@@ -71,7 +71,7 @@ function readCell(column: ColumnInput, given: number | string | undefined): Resu
   const parsed = typeof given === 'number' ? ok(given) : parseQuantity(given, unit)
   if (!parsed.ok) return err(parsed.error.message)
   const problem = boundProblem({ ...column, unit }, parsed.value)
-  return problem === null ? parsed : err(problem)
+  return problem === null ? ok(parsed.value + 0) : err(problem)
 }
 
 /** "2 cells (x, y)". */

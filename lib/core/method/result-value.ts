@@ -1,6 +1,7 @@
 import type { Unit } from '../units/unit'
 import type { ResultValue } from './method'
 
+/** A zero has no sign: stored as JSON it would come back without it. */
 const resultOf =
   (role: ResultValue['role']) =>
   (key: string, label: string, symbol: string, unit: Unit, value: number): ResultValue => ({
@@ -8,7 +9,7 @@ const resultOf =
     label,
     symbol,
     unit,
-    value,
+    value: value + 0,
     role,
   })
 
