@@ -12,7 +12,7 @@ export default defineConfig({
   },
   test: {
     include: ['tests/{unit,reference,integration,security}/**/*.test.{ts,tsx}'],
-    setupFiles: ['tests/support/fail-on-console-error.ts'],
+    setupFiles: ['tests/support/fail-on-console-error.ts', 'tests/support/property-seed.ts'],
     server: { deps: { inline: ['kysely'] } },
     testTimeout: 60_000,
     hookTimeout: 60_000,
