@@ -48,6 +48,17 @@ describe('the optimum for an interrupted current', () => {
     )
   })
 
+  // Derived: for a small current the voltage starts at E, RI = E, and the peak exceeds it by χ²; for a large one ζ tends
+  // to 0.265 and the peak to 0.81 IZ, the least first swing of the network.
+  it('is well determined for small and for large currents', () => {
+    const small = interruptOptimum({ source: 1, inductance: 1, current: 1e-4, snubberCapacitance: 1 })
+    expect(small.dampingRatio * 2e-4).toBeCloseTo(1, 6)
+    expect((small.peakVoltage - 1) / 1e-8).toBeCloseTo(1, 3)
+    const large = interruptOptimum({ source: 1, inductance: 1, current: 1e4, snubberCapacitance: 1 })
+    expect(large.dampingRatio).toBeCloseTo(0.265, 3)
+    expect(large.peakVoltage / 1e4).toBeCloseTo(0.81, 3)
+  })
+
   it('passes smoothly through critical damping', () => {
     const [below, at, above] = [1 - 1e-7, 1, 1 + 1e-7].map((zeta) => interruptPeak(0.4, zeta))
     expect(below).toBeCloseTo(at ?? 0, 6)

@@ -10,7 +10,7 @@ const needed = { isRequired: true, atLeast: 1e-15, atMost: 1e9 } as const
 /** RC snubber of a switch that interrupts an inductive current. */
 export const currentInterruptSnubber = defineMethod({
   id: 'current-interrupt-snubber',
-  version: 1,
+  version: 2,
   title: 'Snubber for an interrupted current',
   purpose:
     'Finds the resistor with the least peak voltage when a switch, such as a relay contact or a thyristor, interrupts the current in an inductance.',
@@ -66,7 +66,7 @@ export const currentInterruptSnubber = defineMethod({
     const { currentFactor, dampingRatio, resistance, peakVoltage } = optimum
     const standard = nearestByRatio(resistance, 'E24')
     const peakWith = (r: number) => source * interruptPeak(currentFactor, (dampingRatio * r) / resistance)
-    const isInRange = dampingRatio > 0.011 && dampingRatio < 99
+    const isInRange = currentFactor >= 1e-5 && currentFactor <= 1e5
     return ok({
       results: [
         main('resistance', 'Resistor of the least peak', 'R', 'Ω', resistance),
@@ -82,8 +82,8 @@ export const currentInterruptSnubber = defineMethod({
         {
           passed: isInRange,
           sentence: isInRange
-            ? 'The optimum lies well within the range that was searched.'
-            : 'The optimum lies at the end of the range that was searched: the current is far too small or too large for this capacitor.',
+            ? 'The current suits the capacitor: the optimum is well determined.'
+            : 'The current is far too small or too large for this capacitor: the least peak hardly depends on the resistor, and the optimum is not well determined.',
         },
       ],
       figures: [peakFigure(source, currentFactor, dampingRatio, resistance)],

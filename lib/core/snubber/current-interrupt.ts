@@ -26,14 +26,18 @@ export type InterruptOptimum = {
  *
  * Derived for this circuit: no capacitance of the switch itself. χ ≥ 0, ζ > 0.
  */
-export function interruptPeak(currentFactor: number, dampingRatio: number): number {
+export const interruptPeak = (currentFactor: number, dampingRatio: number): number =>
+  1 + interruptExcess(currentFactor, dampingRatio)
+
+/** How far the peak exceeds E, as a multiple of E: small currents leave little of it beside the 1. */
+function interruptExcess(currentFactor: number, dampingRatio: number): number {
   const start = 2 * dampingRatio * currentFactor - 1
   const slope = currentFactor * (1 - 4 * dampingRatio ** 2) + 2 * dampingRatio
   const crests = crestTimes(dampingRatio, start, slope).map((time) =>
     excessAt(dampingRatio, start, slope, time),
   )
   // Long after, the voltage is that of the source.
-  return 1 + Math.max(start, 0, ...crests)
+  return Math.max(start, 0, ...crests)
 }
 
 /** The first two instants at which the excess neither rises nor falls. */
@@ -48,8 +52,9 @@ function crestTimes(dampingRatio: number, start: number, slope: number): readonl
   if (over * under <= 0) return []
   const rate = Math.sqrt(dampingRatio ** 2 - 1)
   if (rate === 0) return [over / under]
-  const ratio = (rate * over) / under
-  return ratio < 1 ? [Math.atanh(ratio) / rate] : []
+  // artanh of the ratio, without the cancellation that a large damping brings.
+  const rest = start + slope / (rate + dampingRatio)
+  return rest * under > 0 ? [Math.log((under + rate * over) / rest) / (2 * rate)] : []
 }
 
 function excessAt(dampingRatio: number, start: number, slope: number, time: number): number {
@@ -61,32 +66,37 @@ function excessAt(dampingRatio: number, start: number, slope: number, time: numb
   }
   const rate = Math.sqrt(dampingRatio ** 2 - 1)
   if (rate === 0) return Math.exp(-time) * (start + rest * time)
-  const grown = Math.exp((rate - dampingRatio) * time)
+  const grown = Math.exp(-time / (rate + dampingRatio))
   const shrunk = Math.exp(-(rate + dampingRatio) * time)
   return (start * (grown + shrunk)) / 2 + (rest * (grown - shrunk)) / (2 * rate)
 }
 
-const [leastDamping, mostDamping] = [0.01, 100]
+/** The optimum lies between: near 0.25 for large currents, and at ½/χ, where the voltage starts at E, for small ones. */
+const searchedDamping = (currentFactor: number): readonly [low: number, high: number] => [
+  0.1,
+  1 + 1 / currentFactor,
+]
+
 const coarse = 120
 
 /**
  * The snubber resistor with the least peak voltage when a current is interrupted, by search over the exact peak. This is
  * another problem than a ringing node with a capacitance of its own and no current at the start: neither resistor does
- * for the other. After W. McMurray, “Optimum Snubbers for Power Semiconductors”, IEEE Trans. Industry Applications
+ * for the other. Needs I > 0: without a current no resistor is the best. After W. McMurray, “Optimum Snubbers for Power Semiconductors”, IEEE Trans. Industry Applications
  * IA-8, 1972, 593-600 (bibliographic data seen; the numbers are derived here).
  */
 export function interruptOptimum(given: InterruptedCurrent): InterruptOptimum {
   const impedance = Math.sqrt(given.inductance / given.snubberCapacitance)
   const currentFactor = (given.current / given.source) * impedance
-  const peakAt = (logDamping: number) => interruptPeak(currentFactor, Math.exp(logDamping))
-  const [low, high] = [Math.log(leastDamping), Math.log(mostDamping)]
+  const excessOf = (logDamping: number) => interruptExcess(currentFactor, Math.exp(logDamping))
+  const [low, high] = searchedDamping(currentFactor).map(Math.log) as [number, number]
   const step = (high - low) / coarse
   let best = low
   for (let index = 1; index <= coarse; index += 1) {
     const candidate = low + index * step
-    if (peakAt(candidate) < peakAt(best)) best = candidate
+    if (excessOf(candidate) < excessOf(best)) best = candidate
   }
-  const dampingRatio = Math.exp(minimiseOn(peakAt, best - step, best + step, 1e-10))
+  const dampingRatio = Math.exp(minimiseOn(excessOf, best - step, best + step, 1e-10))
   return {
     currentFactor,
     dampingRatio,

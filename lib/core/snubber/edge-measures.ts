@@ -1,71 +1,64 @@
-import { minimiseOn } from '../linear/minimise'
-import { magnitude, type Complex } from '../linear/complex'
+import type { Complex } from '../linear/complex'
+import { highestIn, largestMagnitudeIn, type Window } from './crest'
 import { valueOf, type EdgeResponse } from './edge-response'
-
-/** Enough in each window to find the highest swing; the golden section then finds its crest. */
-const samples = 30
 
 /** After so many time constants a mode is gone. */
 const settled = 40
 
-type Window = readonly [from: number, to: number]
+/** A ring that lasts longer is nearly undamped: its first cycles are as large as any. */
+const mostCycles = 64
 
-type Extreme = { readonly time: number; readonly value: number }
+/** Points of each window in which a crossing is looked for. */
+const samples = 30
 
-/** The largest value of a response that ends at its final value, and when it is reached, in normalised time. */
-export const peakOf = (response: EdgeResponse, poles: readonly Complex[]): Extreme =>
-  maximumIn(aroundEnd(response, poles), (time) => valueOf(response, time))
+/** The largest value of a response that ends at its final value. */
+export const peakOf = (response: EdgeResponse, poles: readonly Complex[]): number =>
+  Math.max(...aroundEnd(response, cyclesOf(poles)).map(highestIn))
 
 /** The largest magnitude, for a current that swings both ways and may be largest at the beginning of the edge. */
 export const peakMagnitudeOf = (response: EdgeResponse, poles: readonly Complex[]): number =>
-  maximumIn(everywhere(response, poles), (time) => Math.abs(valueOf(response, time))).value
+  Math.max(...everywhere(response, poles).map(largestMagnitudeIn))
 
 /**
  * Where a rising response peaks: within the first cycle of each mode after the edge, since every mode decays from there,
  * or within the last cycle before its end, where the slope adds to the ring.
  */
-function aroundEnd({ edge }: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
-  const cycles = new Set(poles.map(cycleOf))
-  return [...cycles].flatMap((cycle): Window[] =>
-    edge === 0
-      ? [[0, cycle]]
-      : [
-          [Math.max(0, edge - cycle), edge],
-          [edge, edge + cycle],
-        ],
-  )
+function aroundEnd({ edge, onEdge, after }: EdgeResponse, cycles: readonly number[]): readonly Window[] {
+  const afterEnd = cycles.map((to): Window => ({ stretch: after, from: 0, to }))
+  if (edge === 0) return afterEnd
+  const begins = new Set(cycles.map((cycle) => Math.max(0, edge - cycle)))
+  return [...[...begins].map((from): Window => ({ stretch: onEdge, from, to: edge })), ...afterEnd]
 }
 
+/** Besides, cycle by cycle from the beginning of the edge: a ring decays while what it rides on still rises. */
 function everywhere(response: EdgeResponse, poles: readonly Complex[]): readonly Window[] {
-  const { edge } = response
-  const beginnings = edge === 0 ? [] : [...new Set(poles.map(cycleOf))].map((cycle) => Math.min(cycle, edge))
-  return [...beginnings.map((end): Window => [0, end]), ...aroundEnd(response, poles)]
+  const { edge, onEdge: stretch } = response
+  const cycles = cyclesOf(poles)
+  const around = aroundEnd(response, cycles)
+  if (edge <= Math.min(...cycles)) return around
+  const decays = poles.map(({ re }) => (2.2 * Math.PI) / Math.abs(re))
+  const length = Math.min(edge, Math.max(...decays))
+  const beginnings = cycles.flatMap((cycle) => {
+    const count = Math.min(mostCycles, Math.ceil(length / cycle))
+    return Array.from({ length: count }, (_, index): Window => {
+      const from = index * cycle
+      return { stretch, from, to: Math.min(from + cycle, edge) }
+    })
+  })
+  return [...beginnings, ...around]
 }
 
-/** A little more than the cycle of an oscillation; seven time constants of what does not oscillate. */
-function cycleOf(pole: Complex): number {
-  const size = magnitude(pole)
-  const slowest = (20 * Math.PI) / size
-  return pole.im === 0 ? (2.2 * Math.PI) / size : Math.min((2.2 * Math.PI) / Math.abs(pole.im), slowest)
-}
+const cyclesOf = (poles: readonly Complex[]): readonly number[] => [...new Set(poles.flatMap(spansOf))]
 
-function maximumIn(windows: readonly Window[], at: (time: number) => number): Extreme {
-  let best = { time: 0, value: at(0), step: 0 }
-  for (const [from, to] of windows) {
-    const step = (to - from) / samples
-    for (let index = 0; index <= samples; index += 1) {
-      const time = from + index * step
-      const value = at(time)
-      if (value > best.value) best = { time, value, step }
-    }
-  }
-  const crest = minimiseOn(
-    (time) => -at(time),
-    Math.max(0, best.time - best.step),
-    best.time + best.step,
-    1e-7,
-  )
-  return at(crest) > best.value ? { time: crest, value: at(crest) } : best
+/**
+ * A little more than the cycle of an oscillation; seven time constants of what does not oscillate; both where a pair of
+ * poles is so nearly real that its cycle is much longer than what it does at the beginning.
+ */
+function spansOf({ re, im }: Complex): readonly number[] {
+  const decay = (2.2 * Math.PI) / Math.abs(re)
+  if (im === 0) return [decay]
+  const cycle = Math.min((2.2 * Math.PI) / Math.abs(im), (20 * Math.PI) / Math.hypot(re, im))
+  return decay < cycle ? [decay, cycle] : [cycle]
 }
 
 /** The time from the first crossing of 10 % to the first crossing of 90 % of the final value, normalised. */
@@ -75,13 +68,17 @@ export function riseTimeOf(response: EdgeResponse, poles: readonly Complex[]): n
 }
 
 function rasterOf(response: EdgeResponse, poles: readonly Complex[]): readonly number[] {
+  const { edge, after } = response
   const slowest = Math.min(...poles.map((pole) => -pole.re))
-  const windows: readonly Window[] = [
-    ...everywhere(response, poles),
-    [0, response.edge],
-    [response.edge, response.edge + (slowest > 0 ? settled / slowest : 0)],
+  const spans = [
+    ...everywhere(response, poles).map(({ stretch, from, to }) => {
+      const begin = stretch === after ? edge : 0
+      return [begin + from, begin + to] as const
+    }),
+    [0, edge] as const,
+    [edge, edge + (slowest > 0 ? settled / slowest : 0)] as const,
   ]
-  const times = windows.flatMap(([from, to]) =>
+  const times = spans.flatMap(([from, to]) =>
     Array.from({ length: samples + 1 }, (_, index) => from + (index * (to - from)) / samples),
   )
   return times.sort((a, b) => a - b)

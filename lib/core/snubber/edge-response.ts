@@ -6,37 +6,44 @@ import { separate } from '../linear/separate'
 /** One exponential of a response, c·exp(p t). */
 export type Mode = { readonly pole: Complex; readonly weight: Complex }
 
+/** offset + slope·t + Σ c exp(p t), t from the beginning of the stretch. */
+export type Stretch = { readonly offset: number; readonly slope: number; readonly modes: readonly Mode[] }
+
 /**
  * The response of a linear network to a source that rises from 0 to 1 on a straight line of duration `edge` and stays:
- * on the edge offset + slope·t + Σ c exp(p t), afterwards final + Σ c exp(p (t − edge)). Normalised time.
+ * one stretch on the edge, one from its end on. Normalised time.
  */
-export type EdgeResponse = {
-  readonly edge: number
-  readonly onEdge: { readonly offset: number; readonly slope: number; readonly modes: readonly Mode[] }
-  readonly after: { readonly final: number; readonly modes: readonly Mode[] }
-}
+export type EdgeResponse = { readonly edge: number; readonly onEdge: Stretch; readonly after: Stretch }
+
+const nothing: Stretch = { offset: 0, slope: 0, modes: [] }
 
 /**
  * Partial fractions of N(s)/(s D(s)) give the step response a0 + Σ R exp(p t) with R = N(p)/(p D′(p)); its running mean
  * over the edge is the ramp response. An edge of 0 is the ideal step. Exact to rounding, but for coinciding poles, which
  * `separate` moves apart.
  */
-export function edgeResponse(numerator: Polynomial, denominator: Polynomial, edge: number): EdgeResponse {
+export function edgeResponse(
+  numerator: Polynomial,
+  denominator: Polynomial,
+  edge: number,
+  roots: readonly Complex[] = rootsOf(denominator),
+): EdgeResponse {
   const final = (numerator[0] ?? 0) / (denominator[0] ?? 1)
-  const poles = separate(rootsOf(denominator))
+  const poles = separate(roots)
   const leading = denominator.at(-1) ?? 1
   const step = poles.map((pole) => ({
     pole,
     weight: divide(valueAt(numerator, pole), multiply(pole, slopeAt(pole, poles, leading))),
   }))
-  const after = step.map(({ pole, weight }) => ({
+  const modes = step.map(({ pole, weight }) => ({
     pole,
     weight: multiply(weight, exponentialMean(scale(pole, edge))),
   }))
-  if (edge === 0) return { edge, onEdge: { offset: 0, slope: 0, modes: [] }, after: { final, modes: after } }
+  const after: Stretch = { offset: final, slope: 0, modes }
+  if (edge === 0) return { edge, onEdge: nothing, after }
   const onEdge = step.map(({ pole, weight }) => ({ pole, weight: divide(weight, scale(pole, edge)) }))
   const offset = -onEdge.reduce((sum, mode) => sum + mode.weight.re, 0)
-  return { edge, onEdge: { offset, slope: final / edge, modes: onEdge }, after: { final, modes: after } }
+  return { edge, onEdge: { offset, slope: final / edge, modes: onEdge }, after }
 }
 
 /** D′ at a pole: the leading coefficient times the distances to the other poles. */
@@ -50,13 +57,12 @@ function slopeAt(pole: Complex, poles: readonly Complex[], leading: number): Com
 export function valueOf(response: EdgeResponse, time: number): number {
   if (time < 0) return 0
   const { edge, onEdge, after } = response
-  if (time < edge) return onEdge.offset + onEdge.slope * time + sumOf(onEdge.modes, time)
-  return after.final + sumOf(after.modes, time - edge)
+  return time < edge ? valueIn(onEdge, time) : valueIn(after, time - edge)
 }
 
-/** Of a conjugate pair one mode is taken twice. */
-function sumOf(modes: readonly Mode[], time: number): number {
-  let sum = 0
+/** The value of a stretch in its own time. Of a conjugate pair one mode is taken twice. */
+export function valueIn({ offset, slope, modes }: Stretch, time: number): number {
+  let sum = offset + slope * time
   for (const { pole, weight } of modes) {
     if (pole.im < 0) continue
     const size = Math.exp(pole.re * time)
@@ -65,6 +71,13 @@ function sumOf(modes: readonly Mode[], time: number): number {
   }
   return sum
 }
+
+/** The rate of change of a stretch. */
+export const derivativeOf = ({ slope, modes }: Stretch): Stretch => ({
+  offset: slope,
+  slope: 0,
+  modes: modes.map(({ pole, weight }) => ({ pole, weight: multiply(pole, weight) })),
+})
 
 /** ∫ of the squared response from the beginning of the edge to infinity; the final value must be 0. */
 export function squareIntegral(response: EdgeResponse): number {

@@ -1,7 +1,8 @@
 import { minimiseOn } from '../linear/minimise'
+import { rootsOf } from '../linear/roots'
 import { edgeResponse } from './edge-response'
 import { peakOf } from './edge-measures'
-import { leastDamping, polesOf } from './modes'
+import { leastDamping } from './modes'
 import { angularFrequency, characteristicImpedance, normalise, type SwitchNode } from './network'
 
 type BareNode = Omit<SwitchNode, 'snubber'>
@@ -22,8 +23,9 @@ export const withSnubber = (node: BareNode, resistance: number, capacitance: num
 /** The overshoot as a fraction of the step, for a straight edge of the given duration in seconds. */
 export function overshootOf(node: SwitchNode, edgeDuration: number): number {
   const { nodeVoltage, denominator } = normalise(node)
-  const response = edgeResponse(nodeVoltage, denominator, edgeDuration * angularFrequency(node))
-  return Math.max(0, peakOf(response, polesOf(node)).value - 1)
+  const poles = rootsOf(denominator)
+  const response = edgeResponse(nodeVoltage, denominator, edgeDuration * angularFrequency(node), poles)
+  return Math.max(0, peakOf(response, poles) - 1)
 }
 
 /**

@@ -8,7 +8,7 @@ const needed = { isRequired: true, atLeast: 1e-15, atMost: 1e12 } as const
 /** Heat in the resistor of an RC snubber driven by a stiff source. */
 export const rcSnubberLoss = defineMethod({
   id: 'rc-snubber-loss',
-  version: 1,
+  version: 2,
   title: 'Loss of R and C in series',
   purpose:
     'Finds the heat and the currents of a resistor and a capacitor across a stiff square wave, however incomplete the charging or slow the edges.',

@@ -45,11 +45,23 @@ export function settledEdgeLoss(
 ): RcLoss {
   const ratio = (resistance * capacitance) / edge
   const charged = -Math.expm1(-1 / ratio)
-  const energy = capacitance * voltage ** 2 * ratio * (1 - ratio * charged)
+  const energy = capacitance * voltage ** 2 * heatedShare(1 / ratio)
   const power = 2 * energy * frequency
   return {
     power,
     rmsCurrent: Math.sqrt(power / resistance),
     peakCurrent: ((capacitance * voltage) / edge) * charged,
   }
+}
+
+/** (x − 1 + exp(−x))/x², ½ for x → 0; a series near zero, where the difference would cancel. */
+function heatedShare(x: number): number {
+  if (x > 0.1) return (x + Math.expm1(-x)) / x ** 2
+  let term = 1 / 2
+  let sum = term
+  for (let power = 3; power <= 12; power += 1) {
+    term *= -x / power
+    sum += term
+  }
+  return sum
 }

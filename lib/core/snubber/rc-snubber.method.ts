@@ -12,7 +12,7 @@ import { switchEdge, type Edge } from './switched-edge'
 /** An RC snubber across a ringing switch node, by the exact third-order network. */
 export const rcSnubber = defineMethod({
   id: 'rc-snubber',
-  version: 1,
+  version: 2,
   ...rcSnubberTexts,
   inputs: rcSnubberInputs,
   example: { lPar: '8 nH', cPar: '300 pF', vStep: '12 V', fSw: '500 kHz', cSnub: '1 nF' },

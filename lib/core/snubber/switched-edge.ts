@@ -1,3 +1,4 @@
+import { rootsOf } from '../linear/roots'
 import { edgeResponse, squareIntegral, valueOf, type EdgeResponse } from './edge-response'
 import { peakMagnitudeOf, peakOf, riseTimeOf } from './edge-measures'
 import { leastDamping, polesOf, ringFrequency } from './modes'
@@ -26,18 +27,19 @@ export function switchEdge(node: SwitchNode, edge: Edge): EdgeOutcome {
   const omega = angularFrequency(node)
   const z0 = characteristicImpedance(node)
   const network = normalise(node)
-  const poles = polesOf(node)
+  const poles = rootsOf(network.denominator)
   const duration = edge.duration * omega
-  const response = (numerator: readonly number[]) => edgeResponse(numerator, network.denominator, duration)
+  const response = (numerator: readonly number[]) =>
+    edgeResponse(numerator, network.denominator, duration, poles)
   const voltage = response(network.nodeVoltage)
   const snubber = response(network.snubberCurrent)
   const energyUnit = edge.step ** 2 * node.capacitance
-  const overshoot = Math.max(0, peakOf(voltage, poles).value - 1)
+  const overshoot = Math.max(0, peakOf(voltage, poles) - 1)
   return {
     peak: edge.from + edge.step * (1 + overshoot),
     overshoot,
-    dampingRatio: leastDamping(node),
-    ringFrequency: ringFrequency(node),
+    dampingRatio: leastDamping(node, poles),
+    ringFrequency: ringFrequency(node, poles),
     snubberEnergy: node.snubber ? (energyUnit * squareIntegral(snubber) * node.snubber.resistance) / z0 : 0,
     seriesEnergy:
       node.seriesResistance === 0

@@ -2,7 +2,7 @@ import { z } from 'zod'
 
 import { impedanceCriterion } from '@/lib/core/filter/impedance-criterion'
 import { cornerFor, optimalDamping } from '@/lib/core/filter/low-pass'
-import { ok } from '@/lib/core/result'
+import { err, ok } from '@/lib/core/result'
 
 import type { Topics } from '../topic'
 import { finiteTopic } from './finite-topic'
@@ -14,6 +14,8 @@ export const filterTopics: Topics = {
     z.object({ measured_dbuv: z.number(), limit_dbuv: z.number(), margin_db: z.number(), f: positive }),
     ({ measured_dbuv, limit_dbuv, margin_db, f }) => {
       const attenuation = measured_dbuv - limit_dbuv + margin_db
+      if (!(attenuation > 0))
+        return err('measured_dbuv: below the limit by the margin, so no filter is needed')
       const { asymptotic, exact } = cornerFor(attenuation, f)
       return ok({
         attenuation_db: attenuation,

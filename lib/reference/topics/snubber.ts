@@ -113,7 +113,7 @@ export const snubberTopics: Topics = {
     },
   ),
   'snubber.current_interrupt_optimum': finiteTopic(
-    z.object({ e: positive, l: positive, i0: z.number().min(0), cs: positive }),
+    z.object({ e: positive, l: positive, i0: positive, cs: positive }),
     ({ e, l, i0, cs }) => {
       const optimum = interruptOptimum({ source: e, inductance: l, current: i0, snubberCapacitance: cs })
       return ok({

@@ -2,6 +2,7 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 
 import { smallLoopField } from '@/lib/core/emission/radiated-field'
+import { findMethod } from '@/lib/core/method/registry'
 import { polygonField } from '@/lib/core/near-field/biot-savart'
 import { loopAxisField } from '@/lib/core/near-field/loop-axis'
 import { magneticDipole } from '@/lib/core/near-field/magnetic-dipole'
@@ -106,5 +107,29 @@ describe('the field of a small loop', () => {
   it('has no radial part in the plane of the loop and no other one on its axis', () => {
     expect(magneticDipole(1e-6, 1e6, 1, Math.PI / 2).radial).toBe(0)
     expect(magneticDipole(1e-6, 1e6, 1, Math.PI)).toMatchObject({ transverse: 0, electric: 0 })
+  })
+})
+
+describe('the near field of a drawn loop as a method', () => {
+  const method = findMethod('polygon-near-field')
+  const runAt = (frequency: string) => {
+    const run = method?.run({ ...method.example, frequency })
+    if (!run?.ok) throw new Error('The worked example was expected to run')
+    return run.value.outcome
+  }
+
+  // Source: quadrature of the law of Biot and Savart by 200 points a side, outside the project.
+  it('gives in its worked example, a loop of 20 mm by 10 mm, 6.8089 A/m', () => {
+    const [magnetic] = runAt('').results
+    expect(magnetic?.value).toBeCloseTo(6.80892473695, 8)
+  })
+
+  // The perimeter of 60 mm is a quarter of the wavelength at 1.25 GHz; 21.5 mm are λ/2π at 2.2 GHz.
+  it('checks the loop and the distance against the wavelength', () => {
+    const checksAt = (frequency: string) => runAt(frequency).validity.map(({ passed }) => passed)
+    expect(checksAt('')).toEqual([])
+    expect(checksAt('1.2 GHz')).toEqual([true, true])
+    expect(checksAt('1.3 GHz')).toEqual([false, true])
+    expect(checksAt('3 GHz')).toEqual([false, false])
   })
 })

@@ -1,7 +1,8 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 
-import type { SwitchNode } from '@/lib/core/snubber/network'
+import { edgeResponse, valueOf } from '@/lib/core/snubber/edge-response'
+import { normalise, type SwitchNode } from '@/lib/core/snubber/network'
 import { nodeVoltageAt, switchEdge } from '@/lib/core/snubber/switched-edge'
 
 // L = 1 H and Cpar = 1 F: ω0 = 1 rad/s and Z0 = 1 Ω.
@@ -70,6 +71,59 @@ describe('one edge at the switch node', () => {
         expect(overshoot).toBeLessThan(Math.max(0, highest - 1) + 1e-3)
       }),
       { numRuns: 200 },
+    )
+  })
+
+  it('finds the largest current on a long edge and after a short one', () => {
+    const duration = fc.oneof(logarithmic(0.05, 2), logarithmic(2, 100))
+    const ringing = fc
+      .record({ k: logarithmic(0.1, 30), rho: logarithmic(0.01, 10), r: logarithmic(0.01, 3) })
+      .map(({ k, rho, r }) => snubbed(k, rho, r))
+    fc.assert(
+      fc.property(ringing, duration, (node, edge) => {
+        const { snubberPeakCurrent } = switchEdge(node, { ...unitStep, duration: edge })
+        const [interval, span] = [(edge + 60) / 60_000, edge + 60]
+        const times = Array.from({ length: 60_000 }, (_, index) => (index / 60_000) * span)
+        const network = normalise(node)
+        const response = edgeResponse(network.snubberCurrent, network.denominator, edge)
+        const largest = Math.max(...times.map((time) => Math.abs(valueOf(response, time))))
+        expect(snubberPeakCurrent).toBeGreaterThan(largest * (1 - 1e-6))
+        // No current changes faster than the step that drives it through the inductance.
+        expect(snubberPeakCurrent).toBeLessThan(largest + interval)
+      }),
+      { numRuns: 60 },
+    )
+  })
+
+  // Found by a dense search: the crest comes early, while the pair of poles has a cycle of 140.
+  it('finds an early crest where the poles are nearly real', () => {
+    const outcome = switchEdge(snubbed(11.609051563829144, 0.5540458, 0.0016316), unitStep)
+    const times = Array.from({ length: 100_000 }, (_, index) => index / 5000)
+    const highest = Math.max(
+      ...nodeVoltageAt(snubbed(11.609051563829144, 0.5540458, 0.0016316), unitStep, times),
+    )
+    expect(outcome.overshoot).toBeCloseTo(highest - 1, 6)
+  })
+
+  it('is the same for every inductance and capacitance of one ratio, in its own time and impedance', () => {
+    fc.assert(
+      fc.property(anyNode, logarithmic(1e-10, 1e-6), logarithmic(1e-12, 1e-8), (node, l, c) => {
+        const [z0, omega] = [Math.sqrt(l / c), 1 / Math.sqrt(l * c)]
+        const { resistance = 0, capacitance = 0 } = node.snubber ?? {}
+        const scaled: SwitchNode = {
+          inductance: l,
+          capacitance: c,
+          seriesResistance: node.seriesResistance * z0,
+          snubber: { resistance: resistance * z0, capacitance: capacitance * c },
+        }
+        // Where poles coincide they are moved apart: so far the digits may differ.
+        const one = switchEdge(node, { ...unitStep, duration: 0.7 })
+        const other = switchEdge(scaled, { ...unitStep, duration: 0.7 / omega })
+        expect(other.overshoot).toBeCloseTo(one.overshoot, 5)
+        expect(other.dampingRatio).toBeCloseTo(one.dampingRatio, 4)
+        expect(other.snubberPeakCurrent * z0).toBeCloseTo(one.snubberPeakCurrent, 5)
+        expect(other.snubberEnergy / c / one.snubberEnergy).toBeCloseTo(1, 3)
+      }),
     )
   })
 })
