@@ -3,11 +3,9 @@ import { describe, expect, it } from 'vitest'
 import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases } from './reference-cases'
 
-const file = './emission-cases.json'
-
 // Source: the far field of a magnetic dipole; the handbook number 131.6e-16 beside it, 0.07 % lower.
 describe('emission of a small loop', () => {
-  it.each(referenceCases(file, 'radiation.dm_loop'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('radiation.dm_loop'))('$id: $how_computed', (item) => {
     const result = resultsOf('small-loop-emission', {
       area: input(item, 'area'),
       current: input(item, 'i'),
@@ -25,7 +23,7 @@ describe('emission of a small loop', () => {
 
 // Source: the far field of a short current element.
 describe('emission of a cable', () => {
-  it.each(referenceCases(file, 'radiation.cm_cable'))('$id', (item) => {
+  it.each(referenceCases('radiation.cm_cable'))('$id', (item) => {
     const result = resultsOf('cable-emission', {
       length: input(item, 'length'),
       current: input(item, 'i_common_mode_total'),
@@ -44,7 +42,7 @@ describe('emission of a cable', () => {
 
 // Source: the transmission matrix of the sheet, whose attenuation is the sum of the three parts.
 describe('skin depth and shielding of a plane wave', () => {
-  it.each(referenceCases(file, 'shielding.skin_depth'))('$id', (item) => {
+  it.each(referenceCases('shielding.skin_depth'))('$id', (item) => {
     const result = resultsOf('skin-depth', {
       conductivity: input(item, 'conductivity'),
       permeability: input(item, 'mu_r'),
@@ -65,7 +63,7 @@ describe('skin depth and shielding of a plane wave', () => {
 
 // Source: the definition of the wavelength; the fraction is common practice.
 describe('distance of stitching vias', () => {
-  it.each(referenceCases(file, 'shielding.stitching_spacing'))('$id', (item) => {
+  it.each(referenceCases('shielding.stitching_spacing'))('$id', (item) => {
     const result = resultsOf('stitching-distance', {
       frequency: input(item, 'f_max'),
       permittivity: input(item, 'eps_eff'),

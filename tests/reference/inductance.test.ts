@@ -6,11 +6,9 @@ import { planeSpreading, viaWithReturns } from '@/lib/core/inductance/via'
 import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases } from './reference-cases'
 
-const file = './inductance-cases.json'
-
 // Source: Maxwell 1865; the perfect conductor by an integral equation for constant flux.
 describe('a circular loop', () => {
-  it.each(referenceCases(file, 'loop.circular'))('$id', (item) => {
+  it.each(referenceCases('loop.circular'))('$id', (item) => {
     const [radius, wireRadius] = [input(item, 'radius'), input(item, 'wire_radius')]
     const result = resultsOf('circular-loop-inductance', { radius, wireRadius })
     const surface = result?.('surface') ?? NaN
@@ -23,7 +21,7 @@ describe('a circular loop', () => {
 
 // Source: exact partial inductances by integration over the cross-section, 1 % for corners and ends.
 describe('a rectangular loop of round wire', () => {
-  it.each(referenceCases(file, 'loop.rectangular_round_wire'))('$id', (item) => {
+  it.each(referenceCases('loop.rectangular_round_wire'))('$id', (item) => {
     const result = resultsOf('rectangular-loop-inductance', {
       width: input(item, 'width'),
       height: input(item, 'height'),
@@ -41,7 +39,7 @@ describe('a rectangular loop of round wire', () => {
 
 // Source: four rectangular bars, self and mutual exact after Hoer and Love 1965, in 60-digit arithmetic.
 describe('a rectangular loop of flat trace', () => {
-  it.each(referenceCases(file, 'loop.rectangular_flat_trace'))('$id', (item) => {
+  it.each(referenceCases('loop.rectangular_flat_trace'))('$id', (item) => {
     const result = resultsOf('rectangular-loop-inductance', {
       width: input(item, 'width'),
       height: input(item, 'height'),
@@ -56,7 +54,7 @@ describe('a rectangular loop of flat trace', () => {
 
 // Source: an integral equation for the current on a thin strip over a perfect plane.
 describe('a trace over a plane', () => {
-  it.each(referenceCases(file, 'line.microstrip_inductance'))('$id', (item) => {
+  it.each(referenceCases('line.microstrip_inductance'))('$id', (item) => {
     const [width, height] = [input(item, 'width'), input(item, 'height')]
     const result = resultsOf('trace-over-plane-inductance', { width, height, length: 0.01 })
     const perLength = result?.('perLength') ?? NaN
@@ -71,7 +69,7 @@ describe('a trace over a plane', () => {
 
 // Source: two-dimensional field of perfect conductors, in closed form.
 describe('wires', () => {
-  it.each(referenceCases(file, 'line.round_pair'))('pair: $id', (item) => {
+  it.each(referenceCases('line.round_pair'))('pair: $id', (item) => {
     const raw = { spacing: input(item, 'spacing'), radius: input(item, 'radius') }
     const result = resultsOf('wire-pair-inductance', raw)
     expectWithin(item, {
@@ -81,14 +79,14 @@ describe('wires', () => {
     expect(resultsOf('wire-pair-inductance', { ...raw, spacing: 2 * raw.radius })).toBeNull()
   })
 
-  it.each(referenceCases(file, 'line.round_wire_over_plane'))('over a plane: $id', (item) => {
+  it.each(referenceCases('line.round_wire_over_plane'))('over a plane: $id', (item) => {
     expectWithin(item, { lp_hf_exact: wireOverPlane(input(item, 'height_centre'), input(item, 'radius')) })
   })
 })
 
 // Source: two-dimensional field between two perfect planes, in closed form.
 describe('vias between planes', () => {
-  it.each(referenceCases(file, 'via.pair_between_planes'))('pair: $id', (item) => {
+  it.each(referenceCases('via.pair_between_planes'))('pair: $id', (item) => {
     const raw = {
       height: input(item, 'height'),
       distance: input(item, 'spacing'),
@@ -100,7 +98,7 @@ describe('vias between planes', () => {
     })
   })
 
-  it.each(referenceCases(file, 'via.signal_with_n_returns'))('several returns: $id', (item) => {
+  it.each(referenceCases('via.signal_with_n_returns'))('several returns: $id', (item) => {
     const result = resultsOf('via-return-inductance', {
       height: input(item, 'height'),
       distance: input(item, 'radius_of_returns'),
@@ -110,7 +108,7 @@ describe('vias between planes', () => {
     expectWithin(item, { l: result?.('inductance') ?? NaN })
   })
 
-  it.each(referenceCases(file, 'plane.radial_spreading'))('spreading: $id', (item) => {
+  it.each(referenceCases('plane.radial_spreading'))('spreading: $id', (item) => {
     const { height, outer, via } = {
       height: input(item, 'height'),
       outer: input(item, 'outer_radius'),
@@ -122,7 +120,7 @@ describe('vias between planes', () => {
 
 // Source: the law of induction.
 describe('the voltage over a loop', () => {
-  it.each(referenceCases(file, 'loop.voltage'))('$id', (item) => {
+  it.each(referenceCases('loop.voltage'))('$id', (item) => {
     const raw = { inductance: input(item, 'l'), change: input(item, 'di'), time: input(item, 'dt') }
     expectWithin(item, { v: resultsOf('loop-voltage', raw)?.('voltage') ?? NaN })
   })

@@ -3,11 +3,9 @@ import { describe, expect, it } from 'vitest'
 import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases } from './reference-cases'
 
-const file = './filter-cases.json'
-
 // Source: the transfer function of an undamped LC stage.
 describe('corner of an input filter', () => {
-  it.each(referenceCases(file, 'filter.required_attenuation'))('$id', (item) => {
+  it.each(referenceCases('filter.required_attenuation'))('$id', (item) => {
     const result = resultsOf('filter-corner', {
       measured: input(item, 'measured_dbuv'),
       limit: input(item, 'limit_dbuv'),
@@ -29,7 +27,7 @@ describe('corner of an input filter', () => {
 
 // Source: direct minimisation of the peak of the output impedance; the criterion after R. D. Middlebrook.
 describe('damping of an input filter', () => {
-  it.each(referenceCases(file, 'filter.parallel_rc_damping'))('$id', (item) => {
+  it.each(referenceCases('filter.parallel_rc_damping'))('$id', (item) => {
     const result = resultsOf('filter-damping', {
       inductance: input(item, 'l'),
       capacitance: input(item, 'c'),
@@ -46,7 +44,7 @@ describe('damping of an input filter', () => {
     })
   })
 
-  it.each(referenceCases(file, 'filter.impedance_criterion'))('$id', (item) => {
+  it.each(referenceCases('filter.impedance_criterion'))('$id', (item) => {
     // n = 2 has its peak at √2 R₀.
     const r0 = input(item, 'z_out_peak') / Math.SQRT2
     const result = resultsOf('filter-damping', {

@@ -7,7 +7,7 @@ import { expectWithin, input, referenceCases } from './reference-cases'
 
 // Source: IEC 60063, table of preferred numbers.
 describe('preferred values', () => {
-  it.each(referenceCases('./snubber-cases.json', 'parts.e_series'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('parts.e_series'))('$id: $how_computed', (item) => {
     const series = z.enum(seriesNames).parse(item.inputs['series'])
     const value = input(item, 'value')
     // A value of the series is its own neighbour; the case has the next ones.

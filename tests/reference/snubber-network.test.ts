@@ -13,12 +13,10 @@ import { nodeRiseTime, switchEdge } from '@/lib/core/snubber/switched-edge'
 
 import { expectWithin, input, referenceCases } from './reference-cases'
 
-const file = './snubber-cases.json'
-
 // Source: the exact third-order network, evaluated outside the project by matrix-exponential recursion and by numeric
 // search over its poles (each case names its means).
 describe('optimum snubber resistance', () => {
-  it.each(referenceCases(file, 'snubber.optimum'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.optimum'))('$id: $how_computed', (item) => {
     const node = {
       inductance: input(item, 'l_par'),
       capacitance: input(item, 'c_par'),
@@ -48,7 +46,7 @@ describe('optimum snubber resistance', () => {
 
 // Source: the exact response to a ramp source, energies by Gauss-Legendre quadrature; second means: an ngspice transient.
 describe('one switched edge', () => {
-  it.each(referenceCases(file, 'snubber.edge_response'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.edge_response'))('$id: $how_computed', (item) => {
     const hasSnubber = 'rs' in item.inputs
     const node = {
       inductance: input(item, 'l'),
@@ -92,7 +90,7 @@ describe('loss of a resistor and a capacitor in series', () => {
     i_peak: peakCurrent,
   })
 
-  it.each(referenceCases(file, 'snubber.rc_dissipation_square'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.rc_dissipation_square'))('$id: $how_computed', (item) => {
     const [rs, cs, v, f] = ['rs', 'cs', 'v', 'f'].map((key) => input(item, key)) as [
       number,
       number,
@@ -102,7 +100,7 @@ describe('loss of a resistor and a capacitor in series', () => {
     expectWithin(item, outputs(squareWaveLoss(rs, cs, v, f, input(item, 'duty'))))
   })
 
-  it.each(referenceCases(file, 'snubber.rc_dissipation_ramp'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.rc_dissipation_ramp'))('$id: $how_computed', (item) => {
     const [rs, cs, v, f] = ['rs', 'cs', 'v', 'f'].map((key) => input(item, key)) as [
       number,
       number,

@@ -5,11 +5,9 @@ import { decrementOf, naturalFrequency } from '@/lib/core/snubber/parasitics'
 import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases } from './reference-cases'
 
-const file = './snubber-cases.json'
-
 // Source: the closed form in 40-digit arithmetic, and a search for L and C whose roots give back both frequencies.
 describe('parasitics from two ring frequencies', () => {
-  it.each(referenceCases(file, 'snubber.parasitics_two_freq'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.parasitics_two_freq'))('$id: $how_computed', (item) => {
     const raw = { f0: input(item, 'f0'), f1: input(item, 'f1'), cAdd: input(item, 'c_add') }
     const result = resultsOf('ring-parasitics', raw)
     if (item.expect_error) {
@@ -23,7 +21,7 @@ describe('parasitics from two ring frequencies', () => {
     })
   })
 
-  it.each(referenceCases(file, 'snubber.parasitics_two_freq_damped'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.parasitics_two_freq_damped'))('$id: $how_computed', (item) => {
     const result = resultsOf('ring-parasitics', {
       f0: input(item, 'f0_damped'),
       zeta0: input(item, 'zeta0'),
@@ -43,7 +41,7 @@ describe('parasitics from two ring frequencies', () => {
 
 // Source: textbook theory of the damped oscillator, in 40-digit arithmetic.
 describe('damping from two peaks', () => {
-  it.each(referenceCases(file, 'snubber.log_decrement'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.log_decrement'))('$id: $how_computed', (item) => {
     const found = decrementOf(input(item, 'first_peak'), input(item, 'later_peak'), input(item, 'cycles'))
     if (!found.ok) throw new Error('A decrement was expected')
     expectWithin(item, {
@@ -61,7 +59,7 @@ describe('damping from two peaks', () => {
 
 // Source: the resonance formula, turned round on the cases with two frequencies.
 describe('inductance from one ring frequency', () => {
-  it.each(referenceCases(file, 'snubber.parasitics_two_freq').filter((item) => !item.expect_error))(
+  it.each(referenceCases('snubber.parasitics_two_freq').filter((item) => !item.expect_error))(
     '$id',
     (item) => {
       const raw = { f0: input(item, 'f0'), cPar: Number(item.expected['c_par']) }
@@ -73,7 +71,7 @@ describe('inductance from one ring frequency', () => {
 
 // Source: the energy integral of the linear fall of the current, by quadrature.
 describe('RCD clamp', () => {
-  it.each(referenceCases(file, 'snubber.rcd_clamp'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('snubber.rcd_clamp'))('$id: $how_computed', (item) => {
     const result = resultsOf('rcd-clamp', {
       lLeak: input(item, 'l_leak'),
       iPeak: input(item, 'i_peak'),

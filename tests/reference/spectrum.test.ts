@@ -7,8 +7,6 @@ import { envelopeAt, envelopeOf, harmonicPeak, type PulseTrain } from '@/lib/cor
 import { resultsOf } from './method-results'
 import { expectWithin, input, referenceCases, type ReferenceCase } from './reference-cases'
 
-const file = './spectrum-cases.json'
-
 const trainOf = (item: ReferenceCase): PulseTrain => ({
   amplitude: input(item, 'amplitude'),
   period: input(item, 'period'),
@@ -21,7 +19,7 @@ const numbers = z.array(z.number())
 
 // Source: the Fourier coefficients, by a second way through numeric integration of the waveform.
 describe('harmonics of a pulse train', () => {
-  it.each(referenceCases(file, 'spectrum.trapezoid'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('spectrum.trapezoid'))('$id: $how_computed', (item) => {
     for (const n of numbers.parse(item.inputs['harmonics'])) {
       const peak = harmonicPeak(trainOf(item), n)
       expectWithin(item, {
@@ -33,7 +31,7 @@ describe('harmonics of a pulse train', () => {
 })
 
 describe('the envelope and the rules for a bandwidth', () => {
-  it.each(referenceCases(file, 'spectrum.envelope'))('$id: $how_computed', (item) => {
+  it.each(referenceCases('spectrum.envelope'))('$id: $how_computed', (item) => {
     const train = trainOf(item)
     const envelope = envelopeOf(train)
     const { amplitude, period, width, rise, fall } = train
@@ -54,7 +52,7 @@ describe('the envelope and the rules for a bandwidth', () => {
     }
   })
 
-  it.each(referenceCases(file, 'spectrum.envelope'))('no harmonic is above it: $id', (item) => {
+  it.each(referenceCases('spectrum.envelope'))('no harmonic is above it: $id', (item) => {
     const train = trainOf(item)
     const envelope = envelopeOf(train)
     for (let n = 1; n < 400; n += 1) {
@@ -72,7 +70,7 @@ describe('levels in decibels', () => {
     uv_per_m_to_dbuv_per_m: (value) => ({ dbuv_per_m: levelOfRms(value * 1e-6) }),
   }
 
-  it.each(referenceCases(file, 'spectrum.db_conversion'))('$id', (item) => {
+  it.each(referenceCases('spectrum.db_conversion'))('$id', (item) => {
     const convert = conversions[z.string().parse(item.inputs['kind'])]
     expectWithin(item, convert?.(input(item, 'value')) ?? {})
     expect(convert).toBeDefined()
