@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises'
 
 import { err, ok, type Result } from '@/lib/core/result'
 import type { Capture } from '@/lib/core/waveform/capture'
+import { extremesOf } from '@/lib/core/waveform/extremes'
 import { parseCapture } from '@/lib/core/waveform/parse-capture'
 import type { CaptureChannelSummary, CaptureRefusal, CaptureSummary } from '@/lib/ports/capture-analyser'
 
@@ -33,13 +34,8 @@ const summaryOf = (capture: Capture): CaptureSummary => ({
 })
 
 function rangeOf(values: Float64Array): Pick<CaptureChannelSummary, 'minimum' | 'maximum'> {
-  let minimum = Infinity
-  let maximum = -Infinity
-  for (const value of values) {
-    if (value < minimum) minimum = value
-    if (value > maximum) maximum = value
-  }
-  return { minimum, maximum }
+  const { low, high } = extremesOf(values)
+  return { minimum: low, maximum: high }
 }
 
 const tooManyChannels = (found: number, most: number): CaptureRefusal => ({

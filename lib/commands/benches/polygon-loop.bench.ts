@@ -1,4 +1,4 @@
-import type { Point2 } from '@/lib/core/inductance/point'
+import type { Point2 } from '@/lib/core/linear/point'
 import { simplePolygon } from '@/lib/core/inductance/polygon'
 import { contourOffsetLoop } from '@/lib/core/inductance/polygon-loop'
 

@@ -2,15 +2,8 @@ import type { ChoiceInput, QuantityInput } from '../method/input-definition'
 import type { ChoiceTable, ResultValue, Source } from '../method/method'
 import { main, step } from '../method/result-value'
 import { cosineWindows } from '../spectrum/cosine-window'
+import { instantInput, probingCaution } from '../waveform/capture-method'
 import type { CaptureSpectrum, ReceiverReading } from './capture-spectrum'
-
-const instant = (label: string, symbol: string, help: string): QuantityInput => ({
-  label,
-  symbol,
-  unit: 's',
-  help,
-  isRequired: false,
-})
 
 const window: ChoiceInput = {
   kind: 'choice',
@@ -58,8 +51,8 @@ export const captureSpectrumMethod = {
   title: 'Spectrum of a capture',
   purpose: 'Gives the lines in a part of a capture with their levels, and what a receiver would read of it.',
   inputs: {
-    from: instant('Part from', 't₁', 'Left empty, the start of the record'),
-    to: instant('Part to', 't₂', 'Left empty, the end of the record'),
+    from: instantInput('Part from', 't₁', 'Left empty, the start of the record'),
+    to: instantInput('Part to', 't₂', 'Left empty, the end of the record'),
     window,
     tuned,
   },
@@ -77,7 +70,7 @@ export const captureSpectrumMethod = {
   ],
   cautions: [
     'Levels at a probe tip are no conducted or radiated emission and say nothing about conformity; that is for an accredited laboratory under the standard in force.',
-    'Switch nodes and circuits tied to the mains can injure: isolated or differential probes, discharged capacitors, qualified people.',
+    probingCaution,
   ],
   sources,
 } as const

@@ -1,3 +1,5 @@
+import { extremesOf } from '../waveform/extremes'
+
 /** What a cut-off ring is told by. */
 export type SwingSearch = {
   readonly from: number
@@ -15,8 +17,6 @@ const fewestFlat = 3
 
 /** A peak is cut off where it has so many times the samples at its extreme that a rounded one would have. */
 const excess = 1.6
-
-type Extremes = { readonly high: number; readonly low: number }
 
 /**
  * The end of the last cut-off swing, where the trace comes back to the level; null where none is cut off.
@@ -44,17 +44,6 @@ export function clippedSwingsEnd(values: Float64Array, search: SwingSearch): num
     start = end
   }
   return clipped
-}
-
-function extremesOf(values: Float64Array, from: number, to: number): Extremes {
-  let high = -Infinity
-  let low = Infinity
-  for (let index = from; index < to; index += 1) {
-    const value = values[index] ?? 0
-    if (value > high) high = value
-    if (value < low) low = value
-  }
-  return { high, low }
 }
 
 function countOf(values: Float64Array, start: number, end: number, wanted: number): number {

@@ -1,6 +1,6 @@
 import { nearSquareFactors } from './radices'
 import { planStockham, runStockham, type StockhamPlan } from './stockham'
-import { rootOfUnity, rootsOfUnity } from './twiddles'
+import { rootsOfUnity } from './twiddles'
 
 /** Series that are transformed side by side: 16 complex values fill four cache lines. */
 const blockWidth = 8
@@ -29,25 +29,19 @@ export function planBlocked(length: number): BlockedPlan | null {
   const columns = planStockham(columnCount)
   if (rows === null || columns === null || rowCount === 1) return null
   const fineBits = Math.ceil(Math.log2(length) / 2)
+  const fineCount = 2 ** fineBits
   const block = 2 * blockWidth * Math.max(rowCount, columnCount)
   return {
     length,
     rows,
     columns,
-    fine: rootsOfUnity(2 ** fineBits, length),
-    coarse: coarseRoots(length, 2 ** fineBits),
+    fine: rootsOfUnity(fineCount, length),
+    coarse: rootsOfUnity(Math.floor(length / fineCount) + 1, length, fineCount),
     fineBits,
     table: new Float64Array(2 * rowCount * (columnCount + rowPadding)),
     x: new Float64Array(block),
     y: new Float64Array(block),
   }
-}
-
-function coarseRoots(length: number, step: number): Float64Array {
-  const count = Math.floor(length / step) + 1
-  const all = new Float64Array(2 * count)
-  for (let k = 0; k < count; k += 1) all.set(rootOfUnity(k * step, length), 2 * k)
-  return all
 }
 
 /**

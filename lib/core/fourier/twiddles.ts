@@ -16,9 +16,9 @@ export function rootOfUnity(k: number, n: number): readonly [number, number] {
   return [octant >= 2 && octant < 6 ? -x : x, octant < 4 ? -y : y]
 }
 
-/** exp(−j 2π k/n) for k = 0 … count − 1, interleaved real and imaginary. */
-export function rootsOfUnity(count: number, n: number): Float64Array {
+/** exp(−j 2π k·step/n) for k = 0 … count − 1, interleaved real and imaginary. */
+export function rootsOfUnity(count: number, n: number, step = 1): Float64Array {
   const roots = new Float64Array(2 * count)
-  for (let k = 0; k < count; k += 1) roots.set(rootOfUnity(k, n), 2 * k)
+  for (let k = 0; k < count; k += 1) roots.set(rootOfUnity(k * step, n), 2 * k)
   return roots
 }

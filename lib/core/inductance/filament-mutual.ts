@@ -2,7 +2,7 @@ import { vacuumPermeability } from '../physics/constants'
 import { err, ok, type Result } from '../result'
 import { filamentQuadrature, type Filament } from './filament-quadrature'
 import { areOverlapping, parallelFilaments } from './parallel-filaments'
-import { cross, difference, dot, norm, scaled, type Point3 } from './point'
+import { cross, difference, dot, norm, scaled, type Point3 } from '../linear/point'
 import { refusal, type InductanceRefusal } from './refusal'
 import { skewClosedForm } from './skew-filaments'
 

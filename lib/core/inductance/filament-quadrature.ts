@@ -1,5 +1,5 @@
 import { filamentPotential } from './filament-potential'
-import { cross, difference, dot, norm, scaled, sum, type Point3 } from './point'
+import { cross, difference, dot, norm, scaled, sum, type Point3 } from '../linear/point'
 import { potentialAlong } from './potential-along'
 
 /** A straight filament as its start, its direction of length 1, and its length. Metres. */

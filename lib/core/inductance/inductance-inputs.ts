@@ -23,6 +23,12 @@ export const derivedHere: Source = {
   standing: 'derived here, checked from outside',
 }
 
+export const rosaSource: Source = {
+  citation:
+    'E. B. Rosa, The Self and Mutual Inductances of Linear Conductors, Bulletin of the Bureau of Standards 4, 1908 (from memory)',
+  standing: 'published',
+}
+
 export const loopCautions = [
   'A computed inductance is an engineering estimate; measure where it decides.',
 ] as const

@@ -8,7 +8,7 @@ import {
 import { main, step } from '../method/result-value'
 import { err, ok, type Result } from '../result'
 import { barSelf, barSelfApproximate, type Bar } from './bar'
-import { currentModelSpread, derivedHere, lengthInput, loopCautions } from './inductance-inputs'
+import { currentModelSpread, derivedHere, lengthInput, loopCautions, rosaSource } from './inductance-inputs'
 import { longSolidSelf, longTubeSelf, solidRoundSelf, tubeSelf } from './round-conductor'
 
 /** Partial self-inductance of a straight piece of wire, trace or bar. */
@@ -44,11 +44,7 @@ export const partialInductance = defineMethod({
   ],
   cautions: loopCautions,
   sources: [
-    {
-      citation:
-        'E. B. Rosa, The Self and Mutual Inductances of Linear Conductors, Bulletin of the Bureau of Standards 4, 1908 (from memory)',
-      standing: 'published',
-    },
+    rosaSource,
     {
       citation:
         'C. Hoer, C. Love, Exact Inductance Equations for Rectangular Conductors, J. Res. NBS 69C, 1965, p. 127',

@@ -1,7 +1,7 @@
 import { neumannIntegral } from './filament-mutual'
 import type { Filament } from './filament-quadrature'
 import { gaussRule, type GaussRule } from './gauss-legendre'
-import type { Side } from './point'
+import type { Side } from '../linear/point'
 
 /** A side with what every pair asks of it: its middle, half of its way, half of its length. */
 export type PlanarSide = {

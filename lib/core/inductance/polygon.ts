@@ -1,5 +1,5 @@
 import { err, ok, type Result } from '../result'
-import type { Point2, Side } from './point'
+import type { Point2, Side } from '../linear/point'
 import { refusal, type InductanceRefusal } from './refusal'
 import { separationSquared } from './segment-distance'
 

@@ -1,4 +1,4 @@
-import type { Point2, Side } from './point'
+import type { Point2, Side } from '../linear/point'
 
 /** Square of the distance of two line pieces in a plane; 0 where they cross or touch. Quick where they are far apart. */
 export function separationSquared(a: Side, b: Side): number {

@@ -1,7 +1,7 @@
 import { vacuumPermeability } from '../physics/constants'
 import { solveLinear } from '../ring/solve-linear'
 import { stripOverPlane } from './line'
-import type { Point2 } from './point'
+import type { Point2 } from '../linear/point'
 
 /**
  * A trace with thickness over a plane by the width correction of Hammerstad and Jensen, in air, H/m:

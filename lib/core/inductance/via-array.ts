@@ -1,6 +1,6 @@
 import { err, ok, type Result } from '../result'
 import { alignedFilaments } from './parallel-filaments'
-import type { Point2 } from './point'
+import type { Point2 } from '../linear/point'
 import { refusal, type InductanceRefusal } from './refusal'
 import { tubeSelf } from './round-conductor'
 import { solvePositive } from './solve-positive'

@@ -1,7 +1,7 @@
 import { defineMethod } from '../method/method'
 import { main, step } from '../method/result-value'
 import { ok } from '../result'
-import { currentModelSpread, derivedHere, lengthInput, loopCautions } from './inductance-inputs'
+import { currentModelSpread, derivedHere, lengthInput, loopCautions, rosaSource } from './inductance-inputs'
 import { longTubeSelf, solidRoundSelf, tubeSelf } from './round-conductor'
 import { viaFluxToSurface, viaMicrostripFit, viaPopular } from './via-partial'
 
@@ -27,11 +27,7 @@ export const viaPartialInductance = defineMethod({
   ],
   cautions: loopCautions,
   sources: [
-    {
-      citation:
-        'E. B. Rosa, The Self and Mutual Inductances of Linear Conductors, Bulletin of the Bureau of Standards 4, 1908 (from memory)',
-      standing: 'published',
-    },
+    rosaSource,
     {
       citation:
         'M. E. Goldfarb, R. A. Pucel, Modeling Via Hole Grounds in Microstrip, IEEE Microwave and Guided Wave Letters 1, 1991, no. 6 (formula from memory)',

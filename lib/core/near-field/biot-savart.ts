@@ -1,5 +1,5 @@
 import { err, ok, type Result } from '../result'
-import { cross, difference, dot, length, type Vector } from './point'
+import { cross, difference, dot, norm, type Point3 } from '../linear/point'
 
 export type FieldRefusal = {
   readonly code: 'too_few_points' | 'side_without_length' | 'on_the_wire'
@@ -19,15 +19,15 @@ const nearest = 1e-9
  * Errors: fewer than three points, a side without length, a point on the wire.
  */
 export function polygonField(
-  points: readonly Vector[],
+  points: readonly Point3[],
   current: number,
-  at: Vector,
-): Result<Vector, FieldRefusal> {
+  at: Point3,
+): Result<Point3, FieldRefusal> {
   if (points.length < 3) return err(tooFewPoints)
-  let field: Vector = [0, 0, 0]
+  let field: Point3 = [0, 0, 0]
   for (const [index, start] of points.entries()) {
     const end = points[(index + 1) % points.length] ?? start
-    const side = length(difference(end, start))
+    const side = norm(difference(end, start))
     if (side === 0) return err(sideWithoutLength(index))
     if (distanceToSide(start, end, at) < nearest * side) return err(onTheWire)
     const [x, y, z] = sideField(start, end, current, at)
@@ -36,9 +36,9 @@ export function polygonField(
   return ok(field)
 }
 
-function sideField(start: Vector, end: Vector, current: number, at: Vector): Vector {
+function sideField(start: Point3, end: Point3, current: number, at: Point3): Point3 {
   const [u, v] = [difference(start, at), difference(end, at)]
-  const [lengthU, lengthV] = [length(u), length(v)]
+  const [lengthU, lengthV] = [norm(u), norm(v)]
   const scale =
     (current * (lengthU + lengthV)) / (4 * Math.PI * lengthU * lengthV * (lengthU * lengthV + dot(u, v)))
   const [x, y, z] = cross(u, v)
@@ -46,12 +46,12 @@ function sideField(start: Vector, end: Vector, current: number, at: Vector): Vec
   return x === 0 && y === 0 && z === 0 ? [0, 0, 0] : [scale * x, scale * y, scale * z]
 }
 
-function distanceToSide(start: Vector, end: Vector, at: Vector): number {
+function distanceToSide(start: Point3, end: Point3, at: Point3): number {
   const side = difference(end, start)
   const along = dot(difference(at, start), side) / dot(side, side)
   const share = Math.min(1, Math.max(0, along))
-  const foot: Vector = [start[0] + share * side[0], start[1] + share * side[1], start[2] + share * side[2]]
-  return length(difference(at, foot))
+  const foot: Point3 = [start[0] + share * side[0], start[1] + share * side[1], start[2] + share * side[2]]
+  return norm(difference(at, foot))
 }
 
 const tooFewPoints: FieldRefusal = {

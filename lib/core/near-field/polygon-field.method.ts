@@ -1,10 +1,10 @@
 import { wavelengthOf } from '../emission/radiated-field'
+import { difference, norm, type Point3 } from '../linear/point'
 import { defineMethod, noSolution, type ValidityCheck } from '../method/method'
 import { main, step } from '../method/result-value'
 import { vacuumPermeability } from '../physics/constants'
 import { err, ok } from '../result'
 import { polygonField } from './biot-savart'
-import { difference, length, type Vector } from './point'
 
 const coordinate = { unit: 'm', atLeast: -1e6, atMost: 1e6 } as const
 const place = { ...coordinate, isRequired: true } as const
@@ -74,7 +74,7 @@ export const polygonNearField = defineMethod({
     z: '6 mm',
   },
   compute: ({ corners, current, x, y, z, frequency }) => {
-    const points = corners.map((corner): Vector => [corner.x, corner.y, corner.z])
+    const points = corners.map((corner): Point3 => [corner.x, corner.y, corner.z])
     const field = polygonField(points, current, [x, y, z])
     if (!field.ok) {
       const about = field.error.code === 'on_the_wire' ? ['x', 'y', 'z'] : ['corners']
@@ -98,15 +98,15 @@ export const polygonNearField = defineMethod({
 
 /** The law of Biot and Savart has no delay: the loop must be short and the point near, against the wavelength. */
 function quasiStaticChecks(
-  corners: readonly Vector[],
-  point: Vector,
+  corners: readonly Point3[],
+  point: Point3,
   wavelength: number,
 ): readonly ValidityCheck[] {
   const perimeter = corners.reduce(
-    (sum, corner, index) => sum + length(difference(corners[(index + 1) % corners.length] ?? corner, corner)),
+    (sum, corner, index) => sum + norm(difference(corners[(index + 1) % corners.length] ?? corner, corner)),
     0,
   )
-  const furthest = Math.max(...corners.map((corner) => length(difference(corner, point))))
+  const furthest = Math.max(...corners.map((corner) => norm(difference(corner, point))))
   const isShort = perimeter < wavelength / 4
   const isNear = furthest < wavelength / (2 * Math.PI)
   return [

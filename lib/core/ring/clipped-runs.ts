@@ -1,3 +1,4 @@
+import { extremesOf } from '../waveform/extremes'
 import { converterStep } from './noise-floor'
 
 /** Fewer equal samples in a row than this at the extreme are what any rounded peak has. */
@@ -13,13 +14,7 @@ export function lastClipped(
   to: number,
   step: number = converterStep(values),
 ): number | null {
-  let high = -Infinity
-  let low = Infinity
-  for (let index = from; index < to; index += 1) {
-    const value = values[index] ?? 0
-    if (value > high) high = value
-    if (value < low) low = value
-  }
+  const { low, high } = extremesOf(values, from, to)
   let clipped: number | null = null
   for (let index = from; index < to; index += 1) {
     const value = values[index]

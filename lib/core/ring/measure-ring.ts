@@ -1,12 +1,12 @@
 import { err, ok, type Result } from '../result'
 
 import { lastClipped } from './clipped-runs'
+import { edgeOf, inDirection } from './edge-of'
 import { findEdge, type EdgeSpan } from './find-edge'
 import { measureRinging } from './measure-ringing'
 import { noiseFloor } from './noise-floor'
-import type { Edge, Ring, RingError, RingMeasurement, StateLevels, Trace } from './ring-measurement'
+import type { Ring, RingError, RingMeasurement, StateLevels, Trace } from './ring-measurement'
 import { stateLevels } from './state-levels'
-import { instantOf } from './transition'
 
 export type RingInput = Trace & {
   /** The window to look at, in seconds; absent means the whole record. */
@@ -30,7 +30,7 @@ export function measureRing(input: RingInput): Result<RingMeasurement, RingError
   const states = stateLevels(trace.values)
   const span = states === null ? null : findEdge(trace.values, states)
   if (states === null || span === null) return err(noEdge)
-  const settled = span.direction === 'rising' ? states : { base: states.top, top: states.base }
+  const settled = inDirection(states, span)
   const floor = noiseFloor(trace.values, span, settled.top - settled.base)
   // Two modes within the noise are one level.
   if (Math.abs(settled.top - settled.base) < 2 * floor) return err(noEdge)
@@ -71,16 +71,6 @@ function windowOf({ values, startSeconds, intervalSeconds, from, to }: RingInput
     values: values.subarray(first, Math.max(first, end)),
     startSeconds: startSeconds + first * intervalSeconds,
     intervalSeconds,
-  }
-}
-
-function edgeOf(trace: Trace, span: EdgeSpan, { base, top }: StateLevels): Edge {
-  const progress = (index: number) => ((trace.values[index] ?? 0) - base) / (top - base)
-  const at = (level: number) => instantOf(progress, span.crossing, level, span.stateEnd)
-  return {
-    direction: span.direction,
-    instantSeconds: trace.startSeconds + at(0.5) * trace.intervalSeconds,
-    transitionSeconds: (at(0.9) - at(0.1)) * trace.intervalSeconds,
   }
 }
 

@@ -1,16 +1,8 @@
-import type { QuantityInput } from '../method/input-definition'
 import type { ResultValue, Source } from '../method/method'
 import { main, step } from '../method/result-value'
+import { instantInput, probingCaution } from '../waveform/capture-method'
 
 import type { RingMeasurement } from './ring-measurement'
-
-const instant = (label: string, symbol: string, help: string): QuantityInput => ({
-  label,
-  symbol,
-  unit: 's',
-  help,
-  isRequired: false,
-})
 
 const sources: readonly Source[] = [
   {
@@ -35,8 +27,8 @@ export const ringMeasurementMethod = {
   title: 'Ring of a capture',
   purpose: 'Measures the first edge in a window of a capture and the ringing after it.',
   inputs: {
-    from: instant('Window from', 't₁', 'Before the edge; left empty, the start of the record'),
-    to: instant('Window to', 't₂', 'Before the next edge; left empty, the end of the record'),
+    from: instantInput('Window from', 't₁', 'Before the edge; left empty, the start of the record'),
+    to: instantInput('Window to', 't₂', 'Before the next edge; left empty, the end of the record'),
   },
   formulas: [
     'v(t) = v_top + A e^(−αt) cos(2π f_d t + φ), by least squares over the ring',
@@ -53,9 +45,7 @@ export const ringMeasurementMethod = {
     'The ring that is seen is the damped one, f_d. A formula for L and C needs the undamped f_n: give f_d together with ζ, or f_n without it, never both corrections.',
     'The probe’s own capacitance is part of what rings.',
   ],
-  cautions: [
-    'Switch nodes and circuits tied to the mains can injure: isolated or differential probes, discharged capacitors, qualified people.',
-  ],
+  cautions: [probingCaution],
   sources,
 } as const
 

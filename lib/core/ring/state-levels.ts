@@ -1,3 +1,4 @@
+import { extremesOf } from '../waveform/extremes'
 import type { StateLevels } from './ring-measurement'
 
 const bins = 256
@@ -11,12 +12,7 @@ const nearMode = 1.5 / 100
  * out. Null where there is no range. Method: histogram modes, IEEE Std 181-2011, clause on state levels.
  */
 export function stateLevels(values: Float64Array): StateLevels | null {
-  let low = Infinity
-  let high = -Infinity
-  for (const value of values) {
-    if (value < low) low = value
-    if (value > high) high = value
-  }
+  const { low, high } = extremesOf(values)
   const range = high - low
   if (!(range > 0)) return null
   const counts = new Uint32Array(bins)

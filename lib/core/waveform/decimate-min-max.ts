@@ -1,3 +1,5 @@
+import { extremesOf } from './extremes'
+
 /** A record thinned for drawing: in each column of the plot the instant and the extremes of its samples. */
 export type DecimatedTrace = {
   readonly x: readonly number[]
@@ -29,13 +31,7 @@ export function decimateMinMax(
   for (let column = 0; column < columns; column += 1) {
     const begin = first + Math.ceil((column * count) / columns)
     const end = first + Math.ceil(((column + 1) * count) / columns)
-    let low = Infinity
-    let high = -Infinity
-    for (let index = begin; index < end; index += 1) {
-      const value = values[index] ?? 0
-      if (value < low) low = value
-      if (value > high) high = value
-    }
+    const { low, high } = extremesOf(values, begin, end)
     x.push(startSeconds + ((begin + end - 1) / 2) * intervalSeconds)
     min.push(low)
     max.push(high)

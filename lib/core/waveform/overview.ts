@@ -1,3 +1,5 @@
+import { extremesOf } from './extremes'
+
 /** Samples to one entry of an overview: 10 million samples become 39,000 entries. */
 export const samplesPerEntry = 256
 
@@ -9,14 +11,8 @@ export function overviewOf(values: Float64Array): Float64Array {
   const entries = Math.ceil(values.length / samplesPerEntry)
   const overview = new Float64Array(2 * entries)
   for (let entry = 0; entry < entries; entry += 1) {
-    const end = Math.min(values.length, (entry + 1) * samplesPerEntry)
-    let low = Infinity
-    let high = -Infinity
-    for (let index = entry * samplesPerEntry; index < end; index += 1) {
-      const value = values[index] ?? 0
-      if (value < low) low = value
-      if (value > high) high = value
-    }
+    const begin = entry * samplesPerEntry
+    const { low, high } = extremesOf(values, begin, Math.min(values.length, begin + samplesPerEntry))
     overview[2 * entry] = low
     overview[2 * entry + 1] = high
   }

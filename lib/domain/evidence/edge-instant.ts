@@ -1,8 +1,8 @@
 import 'server-only'
 
+import { edgeOf, inDirection } from '@/lib/core/ring/edge-of'
 import { findEdge } from '@/lib/core/ring/find-edge'
 import { stateLevels } from '@/lib/core/ring/state-levels'
-import { instantOf } from '@/lib/core/ring/transition'
 import type { FileStore } from '@/lib/ports/file-store'
 
 import { readSamples } from './channel-samples'
@@ -25,7 +25,6 @@ export async function edgeInstant(
   const states = stateLevels(values)
   const span = states === null ? null : findEdge(values, states)
   if (states === null || span === null) return null
-  const { base, top } = span.direction === 'rising' ? states : { base: states.top, top: states.base }
-  const progress = (index: number) => ((values[index] ?? 0) - base) / (top - base)
-  return startSeconds + instantOf(progress, span.crossing, 0.5, span.stateEnd) * intervalSeconds
+  const trace = { values, startSeconds, intervalSeconds }
+  return edgeOf(trace, span, inDirection(states, span)).instantSeconds
 }

@@ -8,7 +8,7 @@ import {
   equivalentRadius,
   rectangularLoop,
 } from '@/lib/core/inductance/loop'
-import type { Point2 } from '@/lib/core/inductance/point'
+import type { Point2 } from '@/lib/core/linear/point'
 import { simplePolygon, type Polygon } from '@/lib/core/inductance/polygon'
 import {
   conductorFits,

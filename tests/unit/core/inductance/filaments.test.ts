@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest'
 
 import { filamentMutual, type Segment } from '@/lib/core/inductance/filament-mutual'
 import { alignedFilaments, parallelFilaments } from '@/lib/core/inductance/parallel-filaments'
-import type { Point3 } from '@/lib/core/inductance/point'
+import type { Point3 } from '@/lib/core/linear/point'
 
 const mutual = (a: Segment, b: Segment): number => {
   const answer = filamentMutual(a, b)

@@ -1,6 +1,6 @@
 import * as fc from 'fast-check'
 
-import type { Point2 } from '@/lib/core/inductance/point'
+import type { Point2 } from '@/lib/core/linear/point'
 import { simplePolygon, type Polygon } from '@/lib/core/inductance/polygon'
 
 export function polygon(corners: readonly Point2[]): Polygon {

@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest'
 import { copyCurve } from '@/lib/core/inductance/copy-curve'
 import { filamentMutual } from '@/lib/core/inductance/filament-mutual'
 import { circularLoop, rectangularLoop } from '@/lib/core/inductance/loop'
-import type { Point2 } from '@/lib/core/inductance/point'
+import type { Point2 } from '@/lib/core/linear/point'
 import { simplePolygon } from '@/lib/core/inductance/polygon'
 import {
   conductorFits,

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest'
 
 import { alignedFilaments } from '@/lib/core/inductance/parallel-filaments'
 import { longTubeSelf, tubeSelf } from '@/lib/core/inductance/round-conductor'
-import type { Point2 } from '@/lib/core/inductance/point'
+import type { Point2 } from '@/lib/core/linear/point'
 import { planeSpreading, viaPair, viaPairThin, viaWithReturns } from '@/lib/core/inductance/via'
 import { viaArray } from '@/lib/core/inductance/via-array'
 import { viaFluxToSurface, viaMicrostripFit, viaPopular } from '@/lib/core/inductance/via-partial'

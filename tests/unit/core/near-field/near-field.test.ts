@@ -3,24 +3,24 @@ import { describe, expect, it } from 'vitest'
 
 import { smallLoopField } from '@/lib/core/emission/radiated-field'
 import { findMethod } from '@/lib/core/method/registry'
+import type { Point3 } from '@/lib/core/linear/point'
 import { polygonField } from '@/lib/core/near-field/biot-savart'
 import { loopAxisField } from '@/lib/core/near-field/loop-axis'
 import { magneticDipole } from '@/lib/core/near-field/magnetic-dipole'
-import type { Vector } from '@/lib/core/near-field/point'
 
-function fieldOf(points: readonly Vector[], current: number, at: Vector): Vector {
+function fieldOf(points: readonly Point3[], current: number, at: Point3): Point3 {
   const field = polygonField(points, current, at)
   if (!field.ok) throw new Error(field.error.message)
   return field.value
 }
 
-const circle = (sides: number, radius: number): Vector[] =>
+const circle = (sides: number, radius: number): Point3[] =>
   Array.from({ length: sides }, (_, index) => {
     const angle = (2 * Math.PI * index) / sides
     return [radius * Math.cos(angle), radius * Math.sin(angle), 0]
   })
 
-const square: readonly Vector[] = [
+const square: readonly Point3[] = [
   [-1, -1, 0],
   [1, -1, 0],
   [1, 1, 0],
@@ -50,7 +50,7 @@ describe('the field of a polygon', () => {
         factor,
         (at, k) => {
           const field = fieldOf(square, 2, at)
-          const larger = square.map(([x, y, z]): Vector => [k * x, k * y, k * z])
+          const larger = square.map(([x, y, z]): Point3 => [k * x, k * y, k * z])
           const scaled = fieldOf(larger, 2 * k, [k * at[0], k * at[1], k * at[2]])
           const turned = fieldOf([...square].reverse(), 2, at)
           for (const axis of [0, 1, 2] as const) {
@@ -63,7 +63,7 @@ describe('the field of a polygon', () => {
   })
 
   it('far away is that of a magnetic dipole of the same area', () => {
-    const at: Vector = [30, 20, 50]
+    const at: Point3 = [30, 20, 50]
     const r = Math.hypot(...at)
     const angle = Math.acos(at[2] / r)
     const { radial, transverse } = magneticDipole(4, 1, r, angle)
@@ -76,7 +76,7 @@ describe('the field of a polygon', () => {
     ['a point on a side', square, [1, 0.3, 0], 'on_the_wire'],
     ['a point at a corner', square, [1, 1, 0], 'on_the_wire'],
   ] as const)('is refused for %s', (_, points, at, code) => {
-    expect(polygonField(points as readonly Vector[], 1, at as Vector)).toMatchObject({ error: { code } })
+    expect(polygonField(points as readonly Point3[], 1, at as Point3)).toMatchObject({ error: { code } })
   })
 
   it('in line with a side takes nothing from it', () => {
