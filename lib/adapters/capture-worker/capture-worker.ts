@@ -1,19 +1,16 @@
 import 'server-only'
-import path from 'node:path'
 
-import { Piscina } from 'piscina'
 import { z } from 'zod'
 
 import { err, type Result } from '@/lib/core/result'
 import type { CaptureAnalyser, CaptureRefusal, CaptureSummary } from '@/lib/ports/capture-analyser'
 import type { FileStore } from '@/lib/ports/file-store'
 
+import { createWorkerPool, limitOf, workerFileOf, type WorkerPool } from '../worker-pool/worker-pool'
 import { jobOf, type CaptureJob } from './capture-job'
 
-const timeLimitMilliseconds = 30_000
-
-/** For the parser's own objects; the columns of samples lie outside of it and are bounded by the size of the text. */
-const heapLimitMebibytes = 512
+/** The heap is for the parser's own objects; the columns of samples lie outside of it, bounded by the size of the text. */
+const limits = { milliseconds: 30_000, heapMebibytes: 512 }
 
 const summary = z.object({
   samples: z.int().positive(),
@@ -34,33 +31,25 @@ const answer = z.discriminatedUnion('ok', [
   }),
 ])
 
-/** Reads captures in one worker thread, which is started when it is first needed and stopped when it runs too long. */
+/** Reads captures in a worker thread of its own. */
 export function createCaptureWorker(
   files: FileStore,
-  workerFile = path.join(/* turbopackIgnore: true */ process.cwd(), '.workers', 'analyse-capture.mjs'),
+  workerFile = workerFileOf('analyse-capture'),
 ): CaptureAnalyser & { readonly close: () => Promise<void> } {
-  const pool = new Piscina({
-    filename: workerFile,
-    minThreads: 0,
-    maxThreads: 1,
-    idleTimeout: 60_000,
-    resourceLimits: { maxOldGenerationSizeMb: heapLimitMebibytes },
-  })
+  const pool = createWorkerPool(workerFile, limits)
   return {
     analyse: (evidenceId) => run(pool, jobOf(files, evidenceId)),
-    close: () => pool.destroy(),
+    close: pool.close,
   }
 }
 
-async function run(pool: Piscina, job: CaptureJob): Promise<Result<CaptureSummary, CaptureRefusal>> {
+async function run(pool: WorkerPool, job: CaptureJob): Promise<Result<CaptureSummary, CaptureRefusal>> {
   try {
-    const answered: unknown = await pool.run(job, { signal: AbortSignal.timeout(timeLimitMilliseconds) })
-    return answer.parse(answered)
+    return answer.parse(await pool.run(job))
   } catch (error) {
-    if (!(error instanceof Error)) throw error
-    if (error.name === 'AbortError' || error.name === 'TimeoutError') return err(tookTooLong)
-    if ('code' in error && error.code === 'ERR_WORKER_OUT_OF_MEMORY') return err(neededTooMuch)
-    throw error
+    const limit = limitOf(error)
+    if (limit === null) throw error
+    return err(limit === 'time' ? tookTooLong : neededTooMuch)
   }
 }
 

@@ -1,14 +1,14 @@
 import { readFile } from 'node:fs/promises'
 import path from 'node:path'
 
-import { Piscina } from 'piscina'
 import { z } from 'zod'
 
 import { err, ok } from '@/lib/core/result'
 import type { PdfRenderer } from '@/lib/ports/pdf-renderer'
 
-const timeLimitMilliseconds = 60_000
-const heapLimitMebibytes = 768
+import { createWorkerPool, limitOf, workerFileOf } from '../worker-pool/worker-pool'
+
+const limits = { milliseconds: 60_000, heapMebibytes: 768 }
 
 const fontFile = path.join(
   /* turbopackIgnore: true */ process.cwd(),
@@ -27,29 +27,20 @@ const answer = z.object({
   areas: z.object({ author: area, reviewer: area }),
 })
 
-/** Renders reports in one worker thread, which is started when first needed and ended when it runs too long. */
+/** Renders reports in a worker thread of its own. */
 export function createPdfWorker(
-  workerFile = path.join(/* turbopackIgnore: true */ process.cwd(), '.workers', 'render-report.mjs'),
+  workerFile = workerFileOf('render-report'),
 ): PdfRenderer & { readonly close: () => Promise<void> } {
-  const pool = new Piscina({
-    filename: workerFile,
-    minThreads: 0,
-    maxThreads: 1,
-    idleTimeout: 60_000,
-    resourceLimits: { maxOldGenerationSizeMb: heapLimitMebibytes },
-  })
+  const pool = createWorkerPool(workerFile, limits)
   return {
     render: async (document) => {
       try {
-        const signal = AbortSignal.timeout(timeLimitMilliseconds)
-        return ok(answer.parse(await pool.run(document, { signal })))
+        return ok(answer.parse(await pool.run(document)))
       } catch (error) {
-        const isTimeout =
-          error instanceof Error && (error.name === 'AbortError' || error.name === 'TimeoutError')
-        return err({ code: isTimeout ? 'render_timed_out' : 'render_failed' })
+        return err({ code: limitOf(error) === 'time' ? 'render_timed_out' : 'render_failed' })
       }
     },
     signatureFont: () => readFile(fontFile),
-    close: () => pool.destroy(),
+    close: pool.close,
   }
 }

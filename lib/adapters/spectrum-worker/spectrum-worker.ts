@@ -1,17 +1,15 @@
 import 'server-only'
-import path from 'node:path'
 
-import { Piscina } from 'piscina'
 import { z } from 'zod'
 
 import { err } from '@/lib/core/result'
 import type { FileStore } from '@/lib/ports/file-store'
 import type { SpectrumComputer, SpectrumRefusal } from '@/lib/ports/spectrum-computer'
 
+import { createWorkerPool, limitOf, workerFileOf } from '../worker-pool/worker-pool'
 import type { SpectrumJob } from './compute-spectrum'
 
-const timeLimitMilliseconds = 20_000
-const heapLimitMebibytes = 512
+const limits = { milliseconds: 20_000, heapMebibytes: 512 }
 
 const thinned = z.object({
   frequencies: z.array(z.number()),
@@ -31,36 +29,25 @@ const answer = z.discriminatedUnion('ok', [
   }),
 ])
 
-/** Computes spectra in one worker thread, which is started when first needed and ended when it runs too long. */
+/** Computes spectra in a worker thread of its own. */
 export function createSpectrumWorker(
   files: FileStore,
-  workerFile = path.join(/* turbopackIgnore: true */ process.cwd(), '.workers', 'compute-spectrum.mjs'),
+  workerFile = workerFileOf('compute-spectrum'),
 ): SpectrumComputer & { readonly close: () => Promise<void> } {
-  const pool = new Piscina({
-    filename: workerFile,
-    minThreads: 0,
-    maxThreads: 1,
-    idleTimeout: 60_000,
-    resourceLimits: { maxOldGenerationSizeMb: heapLimitMebibytes },
-  })
+  const pool = createWorkerPool(workerFile, limits)
   return {
     compute: async ({ fileId, ...request }) => {
       const job: SpectrumJob = { path: files.pathOf(fileId), ...request }
       try {
-        return answer.parse(await pool.run(job, { signal: AbortSignal.timeout(timeLimitMilliseconds) }))
+        return answer.parse(await pool.run(job))
       } catch (error) {
-        if (error instanceof Error && isOverLimit(error)) return err(tookTooLong)
+        if (limitOf(error) !== null) return err(tookTooLong)
         throw error
       }
     },
-    close: () => pool.destroy(),
+    close: pool.close,
   }
 }
-
-const isOverLimit = (error: Error): boolean =>
-  error.name === 'AbortError' ||
-  error.name === 'TimeoutError' ||
-  ('code' in error && error.code === 'ERR_WORKER_OUT_OF_MEMORY')
 
 const tookTooLong: SpectrumRefusal = {
   code: 'took_too_long',
