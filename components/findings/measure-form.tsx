@@ -3,16 +3,10 @@
 import { useState } from 'react'
 
 import type { FormAction } from '@/lib/core/action-state'
+import type { OfferedCapture } from '@/lib/domain/evidence/capture-channel'
 
 import { ActionForm } from '../forms/action-form'
 import { FormQuantity, FormSelect } from '../forms/form-fields'
-
-export type OfferedCapture = {
-  readonly evidenceId: string
-  readonly number: number
-  readonly name: string
-  readonly channels: readonly { readonly position: number; readonly name: string; readonly unit: string }[]
-}
 
 type MeasureFormProps = {
   readonly captures: readonly OfferedCapture[]

@@ -5,9 +5,9 @@ import { channelFileOf } from '@/lib/ports/capture-analyser'
 import { mostSpectrumSamples } from '@/lib/ports/spectrum-computer'
 
 import { operation } from '../operation'
+import { captureChannelFor } from './capture-channel'
 import { captureSpectrumSchema } from './capture-spectrum.schema'
-import { evidenceFor, loadCapture } from './evidence-resource'
-import { noSuchChannel, notACapture, notAVoltage, partTooLong } from './evidence.errors'
+import { notAVoltage, partTooLong } from './evidence.errors'
 import { spectrumFigure, spectrumRemark } from './spectrum-figure'
 
 /** The amplitude spectrum of a part of one channel, as a figure with what was used to make it. */
@@ -15,12 +15,9 @@ export const captureSpectrum = operation(
   'evidence.captureSpectrum',
   captureSpectrumSchema,
   async (deps, actor, input) => {
-    const evidence = await evidenceFor(deps.db, actor, 'evidence.read', input.evidenceId)
-    if (!evidence.ok) return evidence
-    const capture = await loadCapture(deps.db, input.evidenceId)
-    if (!capture) return err(notACapture)
-    const channel = capture.channels[input.channel]
-    if (!channel) return err(noSuchChannel(input.channel))
+    const found = await captureChannelFor(deps.db, actor, input.evidenceId, input.channel)
+    if (!found.ok) return found
+    const { capture, channel } = found.value
     if (channel.unit !== 'V') return err(notAVoltage(channel.name))
     const indexAt = (instant: number) =>
       Math.min(

@@ -3,9 +3,9 @@ import 'server-only'
 import { err, ok } from '@/lib/core/result'
 
 import { operation } from '../operation'
+import { captureChannelFor } from './capture-channel'
 import { readPoints } from './capture-points'
-import { evidenceFor, loadCapture } from './evidence-resource'
-import { noSuchChannel, notACapture, unitsDiffer } from './evidence.errors'
+import { noSuchChannel, unitsDiffer } from './evidence.errors'
 import { capturePointsSchema } from './evidence.schema'
 
 /** One channel between two instants, decimated to the lowest and highest sample of each of `buckets` columns. */
@@ -13,12 +13,9 @@ export const capturePoints = operation(
   'evidence.capturePoints',
   capturePointsSchema,
   async (deps, actor, input) => {
-    const evidence = await evidenceFor(deps.db, actor, 'evidence.read', input.evidenceId)
-    if (!evidence.ok) return evidence
-    const capture = await loadCapture(deps.db, input.evidenceId)
-    if (!capture) return err(notACapture)
-    const channel = capture.channels[input.channel]
-    if (!channel) return err(noSuchChannel(input.channel))
+    const found = await captureChannelFor(deps.db, actor, input.evidenceId, input.channel)
+    if (!found.ok) return found
+    const { capture, channel } = found.value
     if (input.minus !== undefined) {
       const other = capture.channels[input.minus]
       if (!other) return err(noSuchChannel(input.minus))

@@ -1,6 +1,5 @@
 import 'server-only'
 
-import { listEvidenceOf } from '@/db/repositories/evidence.repo'
 import type { Actor } from '@/lib/authz/actor'
 import { notFound, type Denial } from '@/lib/authz/authorize'
 import { err, ok, type Result } from '@/lib/core/result'
@@ -8,18 +7,13 @@ import { err, ok, type Result } from '@/lib/core/result'
 import type { Deps } from '../deps'
 import { engagementFor } from '../engagements/engagement-resource'
 import { operation } from '../operation'
+import { captureChannelFor, offeredCapture, offeredCaptures, type OfferedCapture } from './capture-channel'
 import { compareCapturesSchema } from './compare-captures.schema'
 import { edgeInstant } from './edge-instant'
-import { evidenceFor, loadCapture, type CaptureDto } from './evidence-resource'
-import { noSuchChannel, notACapture, type EvidenceError } from './evidence.errors'
+import type { EvidenceError } from './evidence.errors'
 import { engagementIdSchema } from './evidence.schema'
 
-export type ComparedCapture = {
-  readonly evidenceId: string
-  readonly number: number
-  readonly name: string
-  readonly extent: { readonly from: number; readonly to: number }
-  readonly channels: readonly { readonly position: number; readonly name: string; readonly unit: string }[]
+export type ComparedCapture = OfferedCapture & {
   /** Half-way through the first edge of the chosen channel; null where there is none. */
   readonly edgeSeconds: number | null
 }
@@ -53,18 +47,7 @@ export const listComparable = operation(
   async (deps, actor, input) => {
     const engagement = await engagementFor(deps.db, actor, 'evidence.read', input.engagementId)
     if (!engagement.ok) return engagement
-    const captures = []
-    for (const { id, number, name } of await listEvidenceOf(deps.db, input.engagementId)) {
-      const capture = await loadCapture(deps.db, id)
-      if (!capture) continue
-      const channels = capture.channels.map(({ position, name: channel, unit }) => ({
-        position,
-        name: channel,
-        unit,
-      }))
-      captures.push({ evidenceId: id, number, name, extent: extentOf(capture), channels })
-    }
-    return ok(captures)
+    return ok(await offeredCaptures(deps.db, input.engagementId))
   },
 )
 
@@ -76,26 +59,9 @@ async function comparedCapture(
   evidenceId: string,
   channel: number,
 ): Promise<Result<Loaded, EvidenceError | Denial>> {
-  const evidence = await evidenceFor(deps.db, actor, 'evidence.read', evidenceId)
-  if (!evidence.ok) return evidence
-  const capture = await loadCapture(deps.db, evidenceId)
-  if (!capture) return err(notACapture)
-  if (!capture.channels[channel]) return err(noSuchChannel(channel))
-  const { row } = evidence.value
-  return ok({
-    engagementId: row.engagement_id,
-    capture: {
-      evidenceId,
-      number: row.number,
-      name: row.name,
-      extent: extentOf(capture),
-      channels: capture.channels.map(({ position, name, unit }) => ({ position, name, unit })),
-      edgeSeconds: await edgeInstant(deps.files, evidenceId, channel, capture),
-    },
-  })
+  const found = await captureChannelFor(deps.db, actor, evidenceId, channel)
+  if (!found.ok) return found
+  const { row, capture } = found.value
+  const edgeSeconds = await edgeInstant(deps.files, evidenceId, channel, capture)
+  return ok({ engagementId: row.engagement_id, capture: { ...offeredCapture(row, capture), edgeSeconds } })
 }
-
-const extentOf = ({ startSeconds, samples, intervalSeconds }: CaptureDto) => ({
-  from: startSeconds,
-  to: startSeconds + (samples - 1) * intervalSeconds,
-})

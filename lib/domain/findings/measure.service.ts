@@ -1,12 +1,12 @@
 import 'server-only'
 
-import { listEvidenceOf } from '@/db/repositories/evidence.repo'
 import { withTx } from '@/db/tx'
 import { ringMeasurementMethod } from '@/lib/core/ring/ring-measurement-method'
 import { err, ok } from '@/lib/core/result'
 import { exactQuantityText } from '@/lib/core/units/exact-quantity-text'
 
 import { engagementFor } from '../engagements/engagement-resource'
+import { offeredCaptures } from '../evidence/capture-channel'
 import { evidenceFor, loadCapture, type CaptureDto, type LoadedEvidence } from '../evidence/evidence-resource'
 import { operation } from '../operation'
 import { measureTrace } from './measure-trace'
@@ -40,18 +40,7 @@ export const measureRing = operation('runs.measureRing', measureRingSchema, asyn
 export const listTraces = operation('runs.listTraces', engagementIdSchema, async (deps, actor, input) => {
   const engagement = await engagementFor(deps.db, actor, 'run.create', input.engagementId)
   if (!engagement.ok) return engagement
-  const captures = []
-  for (const { id, number, name } of await listEvidenceOf(deps.db, input.engagementId)) {
-    const capture = await loadCapture(deps.db, id)
-    if (!capture) continue
-    const channels = capture.channels.map((channel) => ({
-      position: channel.position,
-      name: channel.name,
-      unit: channel.unit,
-    }))
-    captures.push({ evidenceId: id, number, name, channels })
-  }
-  return ok(captures)
+  return ok(await offeredCaptures(deps.db, input.engagementId))
 })
 
 function traceOf({ row }: LoadedEvidence, capture: CaptureDto, position: number): MeasuredTrace | undefined {
