@@ -42,20 +42,16 @@ export const captureBench = async (): Promise<readonly BenchLine[]> => {
       value: analysis,
       unit: 'ms',
       reference: null,
-      ratio: null,
       goal,
       goalText: `at most ${goal} ms`,
-      isMet: analysis <= goal,
     },
     {
       name: 'Reading the text of a capture',
       value: speed,
       unit: 'MB/s',
       reference: null,
-      ratio: null,
-      goal: 0,
+      goal: null,
       goalText: 'for information',
-      isMet: true,
     },
   ]
 }
