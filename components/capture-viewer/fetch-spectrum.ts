@@ -1,6 +1,7 @@
 import type { Figure } from '@/lib/core/figure/figure'
 import type { TimeWindow } from '@/lib/figure/time-window'
 
+import { fetchJson } from '../shell/fetch-json'
 import { z } from '../shell/plain-zod'
 import type { TraceSource } from './viewed-capture'
 
@@ -40,8 +41,6 @@ const answered = z.object({
   }),
 })
 
-const problem = z.object({ title: z.string() })
-
 export type FetchedSpectrum = { readonly figure: Figure; readonly remark: string }
 
 /** The spectrum of a channel in view. Throws an `Error` with the portal's sentence where there is none. */
@@ -57,12 +56,8 @@ export async function fetchSpectrum(
     to: String(view.to + shiftSeconds),
     window,
   })
-  const answer = await fetch(`/api/evidence/${evidenceId}/spectrum?${wanted.toString()}`, { signal })
-  const body: unknown = await answer.json()
-  if (answer.ok) {
-    const { figure, remark } = answered.parse(body)
-    return { remark, figure: { ...figure, marks: [] } }
-  }
-  const known = problem.safeParse(body)
-  throw new Error(known.success ? known.data.title : 'The spectrum did not arrive. Try again.')
+  const address = `/api/evidence/${evidenceId}/spectrum?${wanted.toString()}`
+  const otherwise = 'The spectrum did not arrive. Try again.'
+  const { figure, remark } = await fetchJson(address, answered, { otherwise, signal })
+  return { remark, figure: { ...figure, marks: [] } }
 }

@@ -5,11 +5,11 @@ import { keepPreviousData, useQueries } from '@tanstack/react-query'
 import type { TimeWindow } from '@/lib/figure/time-window'
 
 import { traceTones, type CapturePoints, type CaptureTrace } from '../charts/capture-points'
+import { fetchJson } from '../shell/fetch-json'
 import { z } from '../shell/plain-zod'
 import type { TraceSource } from './viewed-capture'
 
 const points = z.object({ x: z.array(z.number()), min: z.array(z.number()), max: z.array(z.number()) })
-const problem = z.object({ title: z.string() })
 
 const buckets = 1200
 
@@ -55,12 +55,9 @@ async function fetchPoints(
     buckets: String(buckets),
     ...(minus === null ? {} : { minus: String(minus) }),
   })
-  const answer = await fetch(`/api/evidence/${evidenceId}/points?${wanted.toString()}`, { signal })
-  const body: unknown = await answer.json()
-  if (!answer.ok) {
-    const known = problem.safeParse(body)
-    throw new Error(known.success ? known.data.title : 'The points did not arrive. Load the page again.')
-  }
-  const fetched = points.parse(body)
+  const fetched = await fetchJson(`/api/evidence/${evidenceId}/points?${wanted.toString()}`, points, {
+    otherwise: 'The points did not arrive. Load the page again.',
+    signal,
+  })
   return shiftSeconds === 0 ? fetched : { ...fetched, x: fetched.x.map((instant) => instant - shiftSeconds) }
 }
