@@ -1,19 +1,9 @@
-import { execFileSync, spawnSync } from 'node:child_process'
-import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
-import { tmpdir } from 'node:os'
-import { join } from 'node:path'
-
 import fc from 'fast-check'
-import { afterAll, describe, expect, it } from 'vitest'
+import { describe, expect, it } from 'vitest'
 
 import { interruptOptimum, interruptPeak } from '@/lib/core/snubber/current-interrupt'
 
-const version = /ngspice-\d+/u.exec(
-  spawnSync('ngspice', ['--version'], { encoding: 'utf8' }).stdout ?? '',
-)?.[0]
-const folder = mkdtempSync(join(tmpdir(), 'interrupt-'))
-
-afterAll(() => rmSync(folder, { recursive: true, force: true }))
+import { ngspiceVersion, transientBy } from '../support/ngspice'
 
 // Source: numeric optimum of the same circuit by ODE integration; chi = 1 as remembered from McMurray 1972 (from memory).
 describe('the optimum for an interrupted current', () => {
@@ -68,39 +58,28 @@ describe('the optimum for an interrupted current', () => {
 
 const circuit = { source: 48, inductance: 60e-9, current: 10, snubberCapacitance: 2.2e-9 }
 
-function netlistOf(resistance: number, output: string): string {
-  return [
-    'A current interrupted in an inductance',
-    `V1 source 0 ${circuit.source}`,
-    `L1 source switch ${circuit.inductance} ic=${circuit.current}`,
-    `R1 switch a ${resistance}`,
-    `C1 a 0 ${circuit.snubberCapacitance} ic=0`,
-    '.options reltol=1e-7 abstol=1e-12 vntol=1e-9',
-    '.control',
-    'set wr_singlescale',
-    'tran 10p 200n 0 10p uic',
-    `wrdata ${output} v(switch)`,
-    'quit',
-    '.endc',
-    '.end',
-  ].join('\n')
-}
-
 function peakBySimulation(resistance: number): number {
-  const [netlist, output] = [join(folder, 'interrupt.cir'), join(folder, 'interrupt.data')]
-  writeFileSync(netlist, netlistOf(resistance, output))
-  execFileSync('ngspice', ['-b', netlist], { stdio: 'ignore' })
-  const voltages = readFileSync(output, 'utf8')
-    .trim()
-    .split('\n')
-    .map((row) => Number(row.trim().split(/\s+/u)[1]))
+  const transient = transientBy({
+    circuit: [
+      'A current interrupted in an inductance',
+      `V1 source 0 ${circuit.source}`,
+      `L1 source switch ${circuit.inductance} ic=${circuit.current}`,
+      `R1 switch a ${resistance}`,
+      `C1 a 0 ${circuit.snubberCapacitance} ic=0`,
+    ],
+    reltol: '1e-7',
+    analysis: 'tran 10p 200n 0 10p uic',
+    node: 'switch',
+  })
   // The first instants are the simulator's start from its initial conditions.
-  return Math.max(...voltages.slice(2))
+  return Math.max(...transient.slice(2).map(([, voltage]) => voltage))
 }
 
 // Source: a transient analysis by ngspice, a circuit simulator of its own.
-describe.skipIf(version === undefined)(
-  version === undefined ? 'the peak against ngspice (skipped: not installed)' : `the peak against ${version}`,
+describe.skipIf(ngspiceVersion === undefined)(
+  ngspiceVersion === undefined
+    ? 'the peak against ngspice (skipped: not installed)'
+    : `the peak against ${ngspiceVersion}`,
   () => {
     it.each([0.5, 1, 2])('agrees within 0.1 % at %d times the optimal resistor', (factor) => {
       const optimum = interruptOptimum(circuit)
